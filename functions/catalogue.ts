@@ -1,0 +1,16 @@
+import type { Entry, Family } from "./cells/entry";
+import { edge } from "./edge/entries";
+
+/** All families in the catalogue's order: what the pane, the check functions and the tests iterate over. */
+export const families: readonly Family[] = [edge];
+
+export const catalogue: readonly Entry[] = families.flatMap((family) => family.entries);
+
+/** The entry of a function by its name in any case, with or without the namespace. */
+export function entryNamed(name: string): Entry | undefined {
+  const wanted = name
+    .trim()
+    .replace(/^SHEATH\./i, "")
+    .toUpperCase();
+  return catalogue.find((entry) => entry.name === wanted);
+}

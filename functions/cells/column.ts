@@ -1,0 +1,92 @@
+import type { Cells, Shape } from "./broadcast";
+import { indexIn, shapeOf } from "./broadcast";
+import { Fault } from "./fault";
+import { isCellError, passOn, toCellError, type CellError } from "./host";
+import type { Input } from "./inputs";
+
+/** A required cell that is blank. */
+export const BLANK = Symbol("blank");
+
+/** One argument read through its input: a value per cell, and apart from them the cells that have none. */
+export interface Column {
+  values: ArrayLike<any>;
+  shape: Shape;
+  /** By index: a blank, or the error that the cell gives. Undefined where every cell has a value. */
+  odd: Map<number, typeof BLANK | CellError> | undefined;
+}
+
+export function isBlank(input: Input, cell: unknown): boolean {
+  return (
+    cell === null ||
+    cell === undefined ||
+    cell === "" ||
+    (cell === 0 && !input.zeroIsValue) ||
+    (typeof cell === "string" && cell.trim() === "")
+  );
+}
+
+/** Reads an argument. Numbers inside the input's range take the quick way; everything else is looked at closely. */
+export function readColumn(input: Input, cells: Cells): Column {
+  if (input.kind === "block") return readBlock(input, cells);
+  const shape = shapeOf(cells);
+  const { rows, columns } = shape;
+  const { least, most, zeroIsValue } = input;
+  const floats = !input.words && input.kind === "quantity" && (!input.optional || typeof input.blank === "number");
+  const values: any = floats ? new Float64Array(rows * columns) : new Array(rows * columns);
+  let odd: Column["odd"];
+  let index = 0;
+  for (let i = 0; i < rows; i++) {
+    const row = cells[i];
+    for (let j = 0; j < columns; j++, index++) {
+      const cell = row[j];
+      if (typeof cell === "number" && cell >= least && cell <= most && (cell !== 0 || zeroIsValue)) {
+        values[index] = cell;
+        continue;
+      }
+      const value = readCell(input, cell);
+      if (value === BLANK || isError(value)) (odd ??= new Map()).set(index, value as typeof BLANK | CellError);
+      else values[index] = value;
+    }
+  }
+  return { values, shape, odd };
+}
+
+function readBlock(input: Input, cells: Cells): Column {
+  const shape = { rows: 1, columns: 1 };
+  if (input.optional && cells.every((row) => row.every((cell) => isBlank(input, cell)))) {
+    return { values: [input.blank], shape, odd: undefined };
+  }
+  const error = cells.flat().find(isCellError);
+  const value = error === undefined ? input.read(cells) : passOn(error, input.name);
+  const odd = value instanceof Fault ? toCellError(value) : error === undefined ? undefined : (value as CellError);
+  return { values: [value], shape, odd: odd && new Map([[0, odd]]) };
+}
+
+function isError(value: unknown): boolean {
+  return value instanceof Fault || isCellError(value);
+}
+
+function readCell(input: Input, cell: unknown): unknown {
+  if (isBlank(input, cell)) return input.optional ? input.blank : BLANK;
+  if (isCellError(cell)) return passOn(cell, input.name);
+  const value = input.read(cell);
+  return value instanceof Fault ? toCellError(value) : value;
+}
+
+/** The column stretched to a shape, so that its cells line up with the result's. */
+export function stretchTo(column: Column, shape: Shape): Column {
+  const own = column.shape;
+  if (own.rows === shape.rows && own.columns === shape.columns) return column;
+  const size = shape.rows * shape.columns;
+  const values = column.values instanceof Float64Array ? new Float64Array(size) : new Array(size);
+  let odd: Column["odd"];
+  for (let i = 0, at = 0; i < shape.rows; i++) {
+    for (let j = 0; j < shape.columns; j++, at++) {
+      const from = indexIn(own, i, j);
+      values[at] = column.values[from];
+      const oddity = column.odd?.get(from);
+      if (oddity !== undefined) (odd ??= new Map()).set(at, oddity);
+    }
+  }
+  return { values, shape, odd };
+}

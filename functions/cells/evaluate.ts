@@ -1,0 +1,173 @@
+import { commonShape, spell, toCells, type Cells, type Shape } from "./broadcast";
+import { BLANK, readColumn, stretchTo, type Column } from "./column";
+import { isTable, type Entry, type Value } from "./entry";
+import { Fault } from "./fault";
+import { toCellError, type CellError } from "./host";
+import type { Input } from "./inputs";
+import { readOutputUnit, type Conversion } from "./quantity-text";
+import type { Quantity } from "./quantities";
+import { applyRows, unexpected } from "./rows";
+
+export type Result = (Value | CellError)[][];
+
+/** The value of one catalogue entry on the cells of a call: one result per row, each with its own error where it has none. */
+export function evaluate(entry: Entry<any>, args: readonly unknown[]): Result {
+  try {
+    return isTable(entry.result) ? evaluateTable(entry, args) : evaluateRows(entry, args, entry.result);
+  } catch (error) {
+    // A bug must stay in its own cell: the host would blank the whole spill, and the next functions with it.
+    return [[toCellError(unexpected(error))]];
+  }
+}
+
+/** The inputs of a call read and lined up: what evaluation, limit checks and uncertainties start from. */
+export interface Reading {
+  shape: Shape;
+  columns: Column[];
+  /** Rows of the common shape that some cell has no value for. */
+  odd: Uint8Array | undefined;
+}
+
+export function readInputs(inputs: readonly Input<any>[], args: readonly unknown[]): Reading | Fault {
+  const cells = inputs.map((_, i) => toCells(args[i]));
+  const ragged = raggedRange(inputs, cells);
+  if (ragged) return ragged;
+  const columns = inputs.map((input, i) => readColumn(input, cells[i]));
+  const shape = commonShape(
+    columns.map((column) => column.shape),
+    inputs.map(({ name }) => name),
+  );
+  if (shape instanceof Fault) return shape;
+  const stretched = columns.map((column) =>
+    column.values.length === 1 || column.values.length === shape.rows * shape.columns ? column : stretchTo(column, shape),
+  );
+  return { shape, columns: stretched, odd: oddRows(stretched, shape.rows * shape.columns) };
+}
+
+function raggedRange(inputs: readonly Input<any>[], cells: Cells[]): Fault | undefined {
+  const at = cells.findIndex((rows) => rows.some((row) => row.length !== rows[0].length) || rows[0].length === 0);
+  return at < 0 ? undefined : new Fault("#VALUE!", `${inputs[at].name}: the range is not a rectangle; select one.`);
+}
+
+function oddRows(columns: readonly Column[], size: number): Uint8Array | undefined {
+  let odd: Uint8Array | undefined;
+  for (const column of columns) {
+    if (!column.odd) continue;
+    odd ??= new Uint8Array(size);
+    if (column.values.length === 1 && size > 1) odd.fill(1);
+    else for (const index of column.odd.keys()) odd[index] = 1;
+  }
+  return odd;
+}
+
+/** What stands in a row that has no complete inputs: "" where the row is empty, else the first error. */
+export function oddResult(inputs: readonly Input<any>[], reading: Reading, row: number): "" | CellError {
+  const many = reading.shape.rows * reading.shape.columns > 1;
+  let blank: Input | undefined;
+  let filled = false;
+  let error: CellError | undefined;
+  for (let i = 0; i < inputs.length; i++) {
+    const column = reading.columns[i];
+    const index = column.values.length === 1 ? 0 : row;
+    const oddity = column.odd?.get(index);
+    if (oddity === BLANK) blank ??= inputs[i];
+    else if (oddity) error ??= oddity;
+    // One cell shared by all rows doesn't make a row half filled, nor does a 0 that may itself be an empty cell.
+    else if (!inputs[i].optional && !(many && column.values.length === 1) && column.values[index] !== 0) filled = true;
+  }
+  if (error) return error;
+  if (!filled) return "";
+  return toCellError(blankFault(blank!));
+}
+
+function blankFault(input: Input): Fault {
+  const example = input.quantity ? ` such as ${input.quantity.example}` : input.kind === "ion" ? ' such as "Ar+"' : "";
+  return new Fault("#VALUE!", `${input.name} is blank; type a value${example}.`);
+}
+
+function evaluateRows(entry: Entry<any>, args: readonly unknown[], result: Quantity): Result {
+  const inputs = entry.takesUnit ? [...entry.inputs, unitInput(result)] : entry.inputs;
+  const reading = readInputs(inputs, args);
+  if (reading instanceof Fault) return [[toCellError(reading)]];
+  const { shape, columns, odd } = reading;
+  const size = shape.rows * shape.columns;
+  const units = entry.takesUnit ? columns[columns.length - 1] : undefined;
+  const values = entry.takesUnit ? columns.slice(0, -1) : columns;
+  const computed = applyRows(entry.compute, values.map((column) => column.values), size, odd);
+  const finish = (index: number): Value | CellError => {
+    if (odd?.[index]) return oddResult(inputs, reading, index);
+    const value = computed[index];
+    if (typeof value !== "number") return value instanceof Fault ? toCellError(value) : (value as Value);
+    const unit: Conversion | undefined = units && units.values[units.values.length === 1 ? 0 : index];
+    const converted = unit ? (value - unit.offset) / unit.scale : value;
+    // NaN − NaN and ∞ − ∞ are both NaN: one test for either.
+    return converted - converted === 0 ? converted : toCellError(notFinite(entry, converted));
+  };
+  const out: Result = new Array(shape.rows);
+  if (shape.columns === 1) {
+    for (let i = 0; i < size; i++) out[i] = [finish(i)];
+  } else {
+    for (let i = 0, index = 0; i < shape.rows; i++) {
+      const row: Result[number] = new Array(shape.columns);
+      for (let j = 0; j < shape.columns; j++, index++) row[j] = finish(index);
+      out[i] = row;
+    }
+  }
+  return out;
+}
+
+/** The last argument of a function that returns a quantity; left blank, the result needs no conversion. */
+function unitInput(result: Quantity): Input<Conversion | undefined> {
+  return {
+    name: "unit",
+    optional: true,
+    blank: undefined,
+    zeroIsValue: false,
+    least: 1,
+    most: 0,
+    kind: "text",
+    read: (cell) =>
+      typeof cell === "string"
+        ? readOutputUnit(result, cell)
+        : new Fault("#VALUE!", `unit: a unit is text; type one such as "${result.unit}".`),
+  };
+}
+
+function notFinite(entry: Entry, value: number): Fault {
+  const what = Number.isNaN(value) ? "has no value" : "is larger than any number a cell can hold";
+  return new Fault("#N/A", `${entry.name}: the result ${what} at these inputs; check their units and sizes.`);
+}
+
+/** A table spills from one set of inputs; where every set gives a single row, a column of sets gives a column of rows. */
+function evaluateTable(entry: Entry<any>, args: readonly unknown[]): Result {
+  const reading = readInputs(entry.inputs, args);
+  if (reading instanceof Fault) return [[toCellError(reading)]];
+  const { shape, columns, odd } = reading;
+  const size = shape.rows * shape.columns;
+  if (shape.columns > 1) return [[toCellError(tableOverRow(entry, shape))]];
+  const tables = applyRows(entry.compute, columns.map((column) => column.values), size, odd);
+  const width = isTable(entry.result) ? entry.result.columns.length : 1;
+  if (size === 1) {
+    if (odd?.[0]) return [[oddResult(entry.inputs, reading, 0)]];
+    return finishTable(entry, tables[0]);
+  }
+  const out: Result = [];
+  for (let i = 0; i < size; i++) {
+    const rows = odd?.[i] ? [[oddResult(entry.inputs, reading, i)]] : finishTable(entry, tables[i]);
+    if (rows.length !== 1) return [[toCellError(tableOverRow(entry, shape))]];
+    out.push([...rows[0], ...new Array(width - rows[0].length).fill("")]);
+  }
+  return out;
+}
+
+function tableOverRow(entry: Entry, shape: Shape): Fault {
+  return new Fault("#VALUE!", `${entry.name} spills a table of its own; give single cells, not ${spell(shape)}.`);
+}
+
+function finishTable(entry: Entry<any>, table: unknown): Result {
+  if (table instanceof Fault) return [[toCellError(table)]];
+  const rows = table as Value[][];
+  return rows.map((row) =>
+    row.map((value) => (typeof value !== "number" || value - value === 0 ? value : toCellError(notFinite(entry, value)))),
+  );
+}

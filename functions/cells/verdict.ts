@@ -1,0 +1,58 @@
+import { NotTested, type Entry, type Limit } from "./entry";
+import { Fault } from "./fault";
+import { format } from "./format";
+
+/** The words that cells and pane share. */
+export type Word = "holds" | "marginal" | "fails" | "not tested";
+
+export interface Verdict {
+  limit: Limit;
+  word: Word;
+  /** The measure, where it could be known. */
+  value?: number;
+  /** The input to give so that the limit can be tested. */
+  needs?: string;
+}
+
+/** What a limit says at these inputs; undefined where it does not apply. */
+export function judge(limit: Limit, values: readonly unknown[]): Verdict | undefined {
+  const value = limit.value(...values);
+  if (value === undefined) return undefined;
+  if (value instanceof NotTested) return { limit, word: "not tested", needs: value.needs };
+  if (Number.isNaN(value)) return { limit, word: "not tested", needs: "inputs with a solution" };
+  return { limit, word: wordFor(limit, value), value };
+}
+
+function wordFor({ holds, fails }: Limit, value: number): Word {
+  const larger = holds >= fails;
+  if (larger ? value >= holds : value <= holds) return "holds";
+  return (larger ? value < fails : value > fails) ? "fails" : "marginal";
+}
+
+/** Every limit of an entry that applies at these inputs, in the entry's order. */
+export function judgeAll(entry: Entry<any>, values: readonly unknown[]): Verdict[] {
+  return entry.limits.map((limit) => judge(limit, values)).filter((verdict) => verdict !== undefined);
+}
+
+/** One verdict as a cell shows it. */
+export function verdictText({ limit, word, value, needs }: Verdict): string {
+  if (word === "not tested") return `not tested: give ${needs}`;
+  if (word === "holds") return "holds";
+  const measured = `${limit.measure} ${format(value!)} (${format(limit.holds)}…${format(limit.fails)})`;
+  return word === "marginal" ? `marginal: ${measured}` : `fails: ${limit.reason}: ${measured}`;
+}
+
+const rank: Record<Word, number> = { fails: 3, marginal: 2, holds: 1, "not tested": 0 };
+
+/** The worst of several verdicts, the first of its kind. */
+export function worst(verdicts: readonly Verdict[]): Verdict | undefined {
+  return verdicts.reduce<Verdict | undefined>(
+    (found, each) => (found === undefined || rank[each.word] > rank[found.word] ? each : found),
+    undefined,
+  );
+}
+
+/** A model that has no solution fails, with the reason its own message gives. */
+export function unsolved(fault: Fault): string {
+  return `fails: ${fault.message}`;
+}
