@@ -50,9 +50,7 @@ export default (env = {}) => {
     const base = common(origin);
     return { ...base, name, entry: { [name]: entry }, plugins: [...base.plugins, ...plugins] };
   };
-  return [
-    page("functions", at("functions/register.ts"), new FunctionsJsonPlugin({ files: frontDoors, origin })),
-  ];
+  return [page("functions", at("functions/register.ts"), new FunctionsJsonPlugin({ files: frontDoors, origin }))];
 };
 
 void CopyPlugin;

@@ -9,7 +9,11 @@ export const T_e = quantityInput("T_e", quantities.temperature);
 
 /** Blank stays undefined, so that a limit can say that the ion temperature was not given; the models then take 0. */
 export const T_i = optional(
-  quantityInput("T_i", quantities.temperature, { least: 0, zeroIsValue: true, band: { low: 0, high: 1000, above: "K meant?" } }),
+  quantityInput("T_i", quantities.temperature, {
+    least: 0,
+    zeroIsValue: true,
+    band: { low: 0, high: 1000, above: "K meant?" },
+  }),
 );
 
 export const edge_ratio = optional(quantityInput("edge_ratio", quantities.ratio, { most: 1 }), freeEdgeRatio);

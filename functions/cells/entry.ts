@@ -54,7 +54,10 @@ export interface Facts<I extends readonly Input<any>[]> {
 }
 
 /** Everything there is to know of one custom function, except the words: those stand in its JSDoc. */
-export interface Entry<I extends readonly Input<any>[] = readonly Input<any>[]> extends Omit<Facts<I>, "compute" | "limits"> {
+export interface Entry<I extends readonly Input<any>[] = readonly Input<any>[]> extends Omit<
+  Facts<I>,
+  "compute" | "limits"
+> {
   name: string;
   compute: (...values: any[]) => number | string | Value[][] | Fault;
   limits: readonly Limit[];

@@ -39,7 +39,9 @@ export function readInputs(inputs: readonly Input<any>[], args: readonly unknown
   );
   if (shape instanceof Fault) return shape;
   const stretched = columns.map((column) =>
-    column.values.length === 1 || column.values.length === shape.rows * shape.columns ? column : stretchTo(column, shape),
+    column.values.length === 1 || column.values.length === shape.rows * shape.columns
+      ? column
+      : stretchTo(column, shape),
   );
   return { shape, columns: stretched, odd: oddRows(stretched, shape.rows * shape.columns) };
 }
@@ -93,7 +95,12 @@ function evaluateRows(entry: Entry<any>, args: readonly unknown[], result: Quant
   const size = shape.rows * shape.columns;
   const units = entry.takesUnit ? columns[columns.length - 1] : undefined;
   const values = entry.takesUnit ? columns.slice(0, -1) : columns;
-  const computed = applyRows(entry.compute, values.map((column) => column.values), size, odd);
+  const computed = applyRows(
+    entry.compute,
+    values.map((column) => column.values),
+    size,
+    odd,
+  );
   const finish = (index: number): Value | CellError => {
     if (odd?.[index]) return oddResult(inputs, reading, index);
     const value = computed[index];
@@ -145,7 +152,12 @@ function evaluateTable(entry: Entry<any>, args: readonly unknown[]): Result {
   const { shape, columns, odd } = reading;
   const size = shape.rows * shape.columns;
   if (shape.columns > 1) return [[toCellError(tableOverRow(entry, shape))]];
-  const tables = applyRows(entry.compute, columns.map((column) => column.values), size, odd);
+  const tables = applyRows(
+    entry.compute,
+    columns.map((column) => column.values),
+    size,
+    odd,
+  );
   const width = isTable(entry.result) ? entry.result.columns.length : 1;
   if (size === 1) {
     if (odd?.[0]) return [[oddResult(entry.inputs, reading, 0)]];
@@ -168,6 +180,8 @@ function finishTable(entry: Entry<any>, table: unknown): Result {
   if (table instanceof Fault) return [[toCellError(table)]];
   const rows = table as Value[][];
   return rows.map((row) =>
-    row.map((value) => (typeof value !== "number" || value - value === 0 ? value : toCellError(notFinite(entry, value)))),
+    row.map((value) =>
+      typeof value !== "number" || value - value === 0 ? value : toCellError(notFinite(entry, value)),
+    ),
   );
 }

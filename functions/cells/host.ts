@@ -37,7 +37,8 @@ const returnable = new Set(["#VALUE!", "#N/A", "#DIV/0!", "#NUM!", "#NULL!"]);
 export function passOn(cell: unknown, name: string): CellError {
   const { message } = cell as { message?: string };
   const code = codeOf(cell as object)!;
-  if (!returnable.has(code)) return toCellError(new Fault("#VALUE!", `${name}: the cell holds ${code}; mend that cell first.`));
+  if (!returnable.has(code))
+    return toCellError(new Fault("#VALUE!", `${name}: the cell holds ${code}; mend that cell first.`));
   const Host = hostError();
   if (cell instanceof Fault) return toCellError(cell);
   return Host ? new Host(code, message || undefined) : { code, message };

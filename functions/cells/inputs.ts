@@ -55,8 +55,17 @@ function readQuantity(name: string, quantity: Quantity, range: Quantity, cell: u
   if (!Number.isFinite(value)) return badInput(name, `${format(value)} is not a finite number`, wanted);
   if (value >= range.least && value <= range.most) return value;
   const given = typeof cell === "string" ? `"${cell.trim()}"` : format(value, 4);
-  if (value < range.least) return badInput(name, `${given} is below the lowest value`, `type ${article(quantity.name)} ${atLeast(range)}, such as ${quantity.example}`);
-  return badInput(name, `${given} is above the highest value`, `type ${article(quantity.name)} of at most ${bound(range.most, quantity)}`);
+  if (value < range.least)
+    return badInput(
+      name,
+      `${given} is below the lowest value`,
+      `type ${article(quantity.name)} ${atLeast(range)}, such as ${quantity.example}`,
+    );
+  return badInput(
+    name,
+    `${given} is above the highest value`,
+    `type ${article(quantity.name)} of at most ${bound(range.most, quantity)}`,
+  );
 }
 
 function atLeast(range: Quantity): string {
@@ -100,7 +109,9 @@ export function ionInput(name = "ion"): Input<Ion> {
 const wantedIon = 'type a formula such as "Ar+" or a mass in u';
 
 function readIonMass(name: string, mass: number): Ion | Fault {
-  return mass > 1e-3 && mass < 5000 ? ionOfMass(mass) : badInput(name, `${format(mass)} u is no mass of an ion`, wantedIon);
+  return mass > 1e-3 && mass < 5000
+    ? ionOfMass(mass)
+    : badInput(name, `${format(mass)} u is no mass of an ion`, wantedIon);
 }
 
 function readIonText(name: string, text: string): Ion | Fault {

@@ -95,7 +95,10 @@ export const quantities = {
   /** A potential drop given without its sign. */
   drop: { ...voltage, name: "voltage", example: "300 V" } as Quantity,
   energy: quantity("energy", "eV", "15 eV", { ...notNegative, thermal: true, band: { low: 0, high: 1e6 } }),
-  workFunction: quantity("work function", "eV", "4.5 eV", { ...positive, band: { low: 1, high: 8, above: "J meant?" } }),
+  workFunction: quantity("work function", "eV", "4.5 eV", {
+    ...positive,
+    band: { low: 1, high: 8, above: "J meant?" },
+  }),
   speed: quantity("speed", "m/s", "2700 m/s", { ...positive, band: { low: 10, high: 1e8, below: "km/s meant?" } }),
   frequency: quantity("frequency", "Hz", "13.56 MHz", {
     ...positive,

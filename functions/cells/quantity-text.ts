@@ -18,7 +18,11 @@ export function readQuantityText(name: string, quantity: Quantity, text: string)
   const decimal = decimalPoint(digits);
   if (decimal === undefined) {
     if (dateText.test(typed)) return wrongUnit(name, quantity, typed, typed);
-    return badInput(name, `"${typed}" may mean a thousand or a decimal`, `write the decimal point as a dot, such as ${quantity.example}`);
+    return badInput(
+      name,
+      `"${typed}" may mean a thousand or a decimal`,
+      `write the decimal point as a dot, such as ${quantity.example}`,
+    );
   }
   const value = Number(exponent ? `${decimal}e${exponent}` : decimal);
   if (unitText === "") return value;
@@ -106,7 +110,8 @@ function thermalBridge(from: Unit, to: Unit): number | undefined {
   return undefined;
 }
 
-const instrumentWords = /^(ol|o\.?l\.?|ovld|overload|over ?range|n\/?a|nan|inf|infinity|-+|err(or)?|\*+|\?+|none|null|open|sat)$/i;
+const instrumentWords =
+  /^(ol|o\.?l\.?|ovld|overload|over ?range|n\/?a|nan|inf|infinity|-+|err(or)?|\*+|\?+|none|null|open|sat)$/i;
 const dateText = /^(\d{1,4}[-/.]\d{1,2}[-/.]\d{1,4}|\d{1,2}:\d{2})/;
 
 function notANumber(name: string, quantity: Quantity, typed: string): Fault {
@@ -118,11 +123,17 @@ function notANumber(name: string, quantity: Quantity, typed: string): Fault {
 }
 
 function wrongUnit(name: string, quantity: Quantity, typed: string, unitText: string): Fault {
-  const expected = quantity.unit ? `type ${article(quantity.name)} such as ${quantity.example}` : "type a number without a unit";
+  const expected = quantity.unit
+    ? `type ${article(quantity.name)} such as ${quantity.example}`
+    : "type a number without a unit";
   if (dateText.test(typed)) return badInput(name, `"${shorten(typed)}" looks like a date or a time`, expected);
   const unit = parseUnit(unitText);
   if (!unit) return badInput(name, `"${shorten(unitText)}" in "${shorten(typed)}" is not a unit known here`, expected);
-  return badInput(name, `"${shorten(unitText)}" is ${kindOf(unit)}, not a unit of ${quantity.name || "number"}`, expected);
+  return badInput(
+    name,
+    `"${shorten(unitText)}" is ${kindOf(unit)}, not a unit of ${quantity.name || "number"}`,
+    expected,
+  );
 }
 
 /** The output unit that [unit] asks for, or why it can't be had. */

@@ -1,4 +1,3 @@
-/* eslint-disable @typescript-eslint/no-explicit-any -- the values' types are the entry's business */
 import { Fault } from "./fault";
 
 type Compute = (...values: any[]) => unknown;
@@ -12,7 +11,7 @@ type Values = ArrayLike<any>;
 export function applyRows(compute: Compute, columns: readonly Values[], size: number, odd?: Uint8Array): unknown[] {
   const out: unknown[] = new Array(size);
   const rows = loops[columns.length] ?? anyNumber;
-  for (let from = 0; from < size; ) {
+  for (let from = 0; from < size;) {
     const stopped = attempt(rows, compute, columns, size, odd, out, from);
     if (stopped === undefined) break;
     out[stopped.row] = stopped.fault;

@@ -145,7 +145,9 @@ export const EDGEDECAYLENGTH = entry("EDGEDECAYLENGTH", {
   compute: (n_edge, T_e, ion, u_0) => {
     const u_B = model.bohmSpeed(T_e, ion);
     if (u_0 === u_B) {
-      return noSolution("At the Bohm speed the potential decays algebraically: it has no decay length; give a faster u_0");
+      return noSolution(
+        "At the Bohm speed the potential decays algebraically: it has no decay length; give a faster u_0",
+      );
     }
     if (u_0 < u_B) {
       return noSolution(
@@ -240,7 +242,11 @@ function crossSectionInput(name: string): Input<number> {
       if (gas) return crossSections[gas];
       const value = area.read(cell);
       if (!(value instanceof Fault) || typeof cell !== "string" || /^[\d.+-]/.test(cell.trim())) return value;
-      return badInput(name, `there is no cross-section here for "${cell.trim()}"`, `type an area such as 1e-18 m^2, or ${gases.join(" or ")}`);
+      return badInput(
+        name,
+        `there is no cross-section here for "${cell.trim()}"`,
+        `type an area such as 1e-18 m^2, or ${gases.join(" or ")}`,
+      );
     },
   };
 }

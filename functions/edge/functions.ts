@@ -1,4 +1,3 @@
-/* eslint-disable @typescript-eslint/no-explicit-any -- cells may hold anything; the entry's inputs read them */
 import { evaluate } from "../cells/evaluate";
 import * as entries from "./entries";
 
@@ -25,7 +24,13 @@ export enum EdgeShape {
  * @param [edge_ratio] Density at the sheath edge over that of the body, 0 to 1; exp(-1/2) unless given.
  * @param [unit] Unit of the result, V unless given.
  */
-export function WALLTOEDGE(V_wall: any[][], V_plasma: any[][], T_e?: any[][], edge_ratio?: any[][], unit?: any[][]): any[][] {
+export function WALLTOEDGE(
+  V_wall: any[][],
+  V_plasma: any[][],
+  T_e?: any[][],
+  edge_ratio?: any[][],
+  unit?: any[][],
+): any[][] {
   return evaluate(entries.WALLTOEDGE, [V_wall, V_plasma, T_e, edge_ratio, unit]);
 }
 
@@ -91,7 +96,13 @@ export function BOHMSPEED(T_e: any[][], ion: any[][], T_i?: any[][], gamma_i?: a
  * @param lambda_i Ion mean free path, m.
  * @param [unit] Unit of the result, m/s unless given.
  */
-export function COLLISIONALBOHMSPEED(T_e: any[][], ion: any[][], n_edge: any[][], lambda_i: any[][], unit?: any[][]): any[][] {
+export function COLLISIONALBOHMSPEED(
+  T_e: any[][],
+  ion: any[][],
+  n_edge: any[][],
+  lambda_i: any[][],
+  unit?: any[][],
+): any[][] {
   return evaluate(entries.COLLISIONALBOHMSPEED, [T_e, ion, n_edge, lambda_i, unit]);
 }
 

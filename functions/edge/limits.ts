@@ -1,4 +1,3 @@
-/* eslint-disable @typescript-eslint/no-explicit-any -- a limit made here serves entries with different inputs */
 import { NotTested, type Limit } from "../cells/entry";
 import { CP, R91 } from "../sources";
 import { debyeLength } from "./model";

@@ -18,7 +18,7 @@ export function plasmaFrequency(n: number, mass: number, charge: number): number
 
 /** Mean free path k_B T_g/(p σ) in m; p in Pa, σ in m², T_g in K. Kinetic theory of gases. */
 export function meanFreePath(p: number, sigma: number, T_g: number): number {
-  return ((k_B * T_g) / p) / sigma;
+  return (k_B * T_g) / p / sigma;
 }
 
 /** Bohm speed √(e(Z T_e + γ_i T_i)/M) in m/s; temperatures in eV. Riemann, J. Phys. D 24 (1991) 493. */

@@ -49,14 +49,16 @@ function elementWeight(symbol: string): number | undefined {
 
 function unreadable(formula: string, at: number): FormulaError {
   const name = formula.toLowerCase();
-  if (Object.hasOwn(symbolsByName, name)) return new FormulaError("is a name", `type the symbol "${symbolsByName[name]}"`);
+  if (Object.hasOwn(symbolsByName, name))
+    return new FormulaError("is a name", `type the symbol "${symbolsByName[name]}"`);
   const where = at < formula.length ? `"${formula.slice(at, at + 6)}" cannot be read` : "it ends too early";
   return new FormulaError(`is not a chemical formula (${where})`, suggestion(formula));
 }
 
 function unknownElement(symbol: string, formula: string): FormulaError {
   const name = formula.toLowerCase();
-  if (Object.hasOwn(symbolsByName, name)) return new FormulaError("is a name", `type the symbol "${symbolsByName[name]}"`);
+  if (Object.hasOwn(symbolsByName, name))
+    return new FormulaError("is a name", `type the symbol "${symbolsByName[name]}"`);
   return new FormulaError(`has no element "${symbol}" with a standard atomic weight`, suggestion(formula, symbol));
 }
 

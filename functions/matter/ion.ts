@@ -26,7 +26,10 @@ export function parseIon(text: string): Ion | FormulaError {
   const typed = text
     .trim()
     .replace(/−/g, "-")
-    .replace(/([²³⁴-⁶]?)([⁺⁻])/g, (_, digit: string, sign: string) => `^${superscripts[digit] ?? ""}${superscripts[sign]}`)
+    .replace(
+      /([²³⁴-⁶]?)([⁺⁻])/g,
+      (_, digit: string, sign: string) => `^${superscripts[digit] ?? ""}${superscripts[sign]}`,
+    )
     .replace(/[₀-₉]/g, (digit) => String(digit.charCodeAt(0) - 0x2080));
   const parts = /^(.*?)(?:\^(\d+)\+|\^\+(\d*)|(\++)|\+(\d+))?$/.exec(typed)!;
   const [, formula, caretDigits, caretPlus, pluses, plusDigits] = parts;
