@@ -1,0 +1,48 @@
+/** What the pane needs of a workbook, and no more. The host, the trial sheet and a saved file each implement it. */
+
+/** A cell by sheet name and A1 address without "$": { sheet: "Pre-clean", address: "B5" }. */
+export interface CellPlace {
+  sheet: string;
+  address: string;
+}
+
+/** What a cell holds: number, text, truth, nothing (null), or an error by its code with its message where known. */
+export type CellContent = number | string | boolean | null | { error: string; message?: string };
+
+/** The used part of one sheet, from its top left cell on. Formulas start with "="; where there is none, undefined. */
+export interface SheetContent {
+  name: string;
+  /** A1 address of the top left cell of the arrays. */
+  origin: string;
+  values: CellContent[][];
+  formulas: (string | undefined)[][];
+  /** Formulas that fill a range from one cell: the anchor's address and the filled range. */
+  spills: { anchor: string; range: string }[];
+  tables: { name: string; range: string; columns: string[] }[];
+}
+
+export interface WorkbookContent {
+  sheets: SheetContent[];
+  /** Defined names and what they refer to, such as { T_e: "Inputs!$B$2" }. */
+  names: Record<string, string>;
+}
+
+export interface Workbook {
+  /** The selected cell, or undefined where there is no sheet (the pane as a plain page). */
+  selection(): Promise<CellPlace | undefined>;
+  /** Calls back whenever another cell is selected; returns how to stop that. */
+  onSelection(listener: (place: CellPlace) => void): () => void;
+  /** Writes formulas or values (null leaves a cell as it is) from the given cell on, to the right and down. */
+  write(from: CellPlace, cells: (string | number | boolean | null)[][]): Promise<void>;
+  /** Selects a cell and brings it into view. */
+  goTo(place: CellPlace): Promise<void>;
+  /** The whole used content, sheet by sheet; progress from 0 to 1; stops early when the signal says so. */
+  read(progress?: (done: number) => void, signal?: AbortSignal): Promise<WorkbookContent>;
+  /** Makes or replaces a sheet of this name with these cells; other sheets are untouched. */
+  replaceSheet(name: string, cells: (string | number | boolean | null)[][]): Promise<void>;
+  /** Small settings kept inside the workbook, such as the reasons for accepted findings. */
+  getSetting(key: string): Promise<string | undefined>;
+  setSetting(key: string, value: string): Promise<void>;
+  /** What this workbook can't do, so that the pane hides it: "write", "read", "chart". */
+  readonly capabilities: ReadonlySet<"write" | "read" | "settings" | "chart">;
+}
