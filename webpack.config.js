@@ -44,13 +44,25 @@ const common = (origin) => ({
   ],
 });
 
+/** A page is written by hand: its HTML is copied as it stands, its script and style are bundled. */
+const html = (path) => new CopyPlugin({ patterns: [{ from: at(path), to: "[name][ext]" }] });
+
 export default (env = {}) => {
   const origin = (env.origin ?? "https://localhost:3000").replace(/\/+$/, "");
-  const page = (name, entry, ...plugins) => {
+  const bundle = (name, entry, ...plugins) => {
     const base = common(origin);
-    return { ...base, name, entry: { [name]: entry }, plugins: [...base.plugins, ...plugins] };
+    return { ...base, name, entry: { [name]: at(entry) }, plugins: [...base.plugins, ...plugins] };
   };
-  return [page("functions", at("functions/register.ts"), new FunctionsJsonPlugin({ files: frontDoors, origin }))];
+  const styled = (name, folder) =>
+    bundle(
+      name,
+      `${folder}/index.ts`,
+      new MiniCssExtractPlugin({ filename: "[name].css" }),
+      html(`${folder}/${name}.html`),
+    );
+  return [
+    bundle("functions", "functions/register.ts", new FunctionsJsonPlugin({ files: frontDoors, origin })),
+    styled("taskpane", "taskpane"),
+    styled("trial", "taskpane/trial"),
+  ].filter(({ entry }) => Object.values(entry).every((file) => existsSync(file)));
 };
-
-void CopyPlugin;
