@@ -93,34 +93,56 @@ function evaluateRows(entry: Entry<any>, args: readonly unknown[], result: Quant
   if (reading instanceof Fault) return [[toCellError(reading)]];
   const { shape, columns, odd } = reading;
   const size = shape.rows * shape.columns;
-  const units = entry.takesUnit ? columns[columns.length - 1] : undefined;
-  const values = entry.takesUnit ? columns.slice(0, -1) : columns;
-  const computed = applyRows(
-    entry.compute,
-    values.map((column) => column.values),
-    size,
-    odd,
-  );
-  const finish = (index: number): Value | CellError => {
+  const values = columns.slice(0, entry.inputs.length).map((column) => column.values);
+  const { numbers, others } = applyRows(entry.compute, values, size, odd);
+  if (entry.takesUnit) convert(numbers, columns[columns.length - 1].values);
+  const special = (index: number): Value | CellError => {
     if (odd?.[index]) return oddResult(inputs, reading, index);
-    const value = computed[index];
-    if (typeof value !== "number") return value instanceof Fault ? toCellError(value) : (value as Value);
-    const unit: Conversion | undefined = units && units.values[units.values.length === 1 ? 0 : index];
-    const converted = unit ? (value - unit.offset) / unit.scale : value;
-    // NaN − NaN and ∞ − ∞ are both NaN: one test for either.
-    return converted - converted === 0 ? converted : toCellError(notFinite(entry, converted));
+    const other = others?.get(index);
+    if (other === undefined) return toCellError(notFinite(entry, numbers[index]));
+    return other instanceof Fault ? toCellError(other) : (other as Value);
   };
-  const out: Result = new Array(shape.rows);
-  if (shape.columns === 1) {
-    for (let i = 0; i < size; i++) out[i] = [finish(i)];
-  } else {
-    for (let i = 0, index = 0; i < shape.rows; i++) {
-      const row: Result[number] = new Array(shape.columns);
-      for (let j = 0; j < shape.columns; j++, index++) row[j] = finish(index);
-      out[i] = row;
-    }
+  const isSpecial = odd || others ? (index: number) => odd?.[index] === 1 || others?.has(index) === true : undefined;
+  return shape.columns === 1 ? asColumn(numbers, special, isSpecial) : asTable(numbers, shape, special, isSpecial);
+}
+
+type Special = (index: number) => Value | CellError;
+type IsSpecial = ((index: number) => boolean) | undefined;
+
+/** The usual long way down: one number per row, so this loop is as lean as a loop written for one function. */
+function asColumn(numbers: Float64Array, special: Special, isSpecial: IsSpecial): Result {
+  const out: Result = new Array(numbers.length);
+  for (let i = 0; i < numbers.length; i++) {
+    const value = numbers[i];
+    // NaN − NaN and ∞ − ∞ are both NaN: one test for either.
+    if (value - value === 0 && (isSpecial === undefined || !isSpecial(i))) out[i] = [value];
+    else out[i] = [special(i)];
   }
   return out;
+}
+
+function asTable(numbers: Float64Array, shape: Shape, special: Special, isSpecial: IsSpecial): Result {
+  return Array.from({ length: shape.rows }, (_, i) =>
+    Array.from({ length: shape.columns }, (_, j) => {
+      const index = i * shape.columns + j;
+      const value = numbers[index];
+      return value - value === 0 && !isSpecial?.(index) ? value : special(index);
+    }),
+  );
+}
+
+/** Numbers in the quantity's own unit to those of the unit asked for, in place. */
+function convert(numbers: Float64Array, units: ArrayLike<Conversion | undefined>): void {
+  if (units.length === 1) {
+    const unit = units[0];
+    if (!unit || (unit.scale === 1 && unit.offset === 0)) return;
+    for (let i = 0; i < numbers.length; i++) numbers[i] = (numbers[i] - unit.offset) / unit.scale;
+    return;
+  }
+  for (let i = 0; i < numbers.length; i++) {
+    const unit = units[i];
+    if (unit) numbers[i] = (numbers[i] - unit.offset) / unit.scale;
+  }
 }
 
 /** The last argument of a function that returns a quantity; left blank, the result needs no conversion. */
@@ -152,7 +174,7 @@ function evaluateTable(entry: Entry<any>, args: readonly unknown[]): Result {
   const { shape, columns, odd } = reading;
   const size = shape.rows * shape.columns;
   if (shape.columns > 1) return [[toCellError(tableOverRow(entry, shape))]];
-  const tables = applyRows(
+  const { others } = applyRows(
     entry.compute,
     columns.map((column) => column.values),
     size,
@@ -161,11 +183,11 @@ function evaluateTable(entry: Entry<any>, args: readonly unknown[]): Result {
   const width = isTable(entry.result) ? entry.result.columns.length : 1;
   if (size === 1) {
     if (odd?.[0]) return [[oddResult(entry.inputs, reading, 0)]];
-    return finishTable(entry, tables[0]);
+    return finishTable(entry, others!.get(0));
   }
   const out: Result = [];
   for (let i = 0; i < size; i++) {
-    const rows = odd?.[i] ? [[oddResult(entry.inputs, reading, i)]] : finishTable(entry, tables[i]);
+    const rows = odd?.[i] ? [[oddResult(entry.inputs, reading, i)]] : finishTable(entry, others!.get(i));
     if (rows.length !== 1) return [[toCellError(tableOverRow(entry, shape))]];
     out.push([...rows[0], ...new Array(width - rows[0].length).fill("")]);
   }

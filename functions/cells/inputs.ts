@@ -3,7 +3,7 @@ import { ionOfMass, parseIon, type Ion } from "../matter/ion";
 import { badInput, Fault } from "./fault";
 import { format } from "./format";
 import { quantities, type Band, type Quantity } from "./quantities";
-import { article, conversionTo, readQuantityText } from "./quantity-text";
+import { article, conversionTo, quantityTextReader, readQuantityText } from "./quantity-text";
 
 /** What a function takes at one place: how its cells are read and what is said of them. */
 export interface Input<T = unknown> {
@@ -33,6 +33,7 @@ export type Range = Partial<Pick<Quantity, "least" | "most" | "zeroIsValue" | "b
 /** A number, bare or with a unit. */
 export function quantityInput(name: string, quantity: Quantity, range: Range = {}): Input<number> {
   const own = { ...quantity, ...range };
+  const readText = quantityTextReader(name, quantity);
   return {
     name,
     optional: false,
@@ -43,28 +44,28 @@ export function quantityInput(name: string, quantity: Quantity, range: Range = {
     quantity,
     band: own.band,
     kind: "quantity",
-    read: (cell) => readQuantity(name, quantity, own, cell),
+    read: (cell) => inRange(name, own, cell, typeof cell === "string" ? readText(cell) : cell),
   };
 }
 
-function readQuantity(name: string, quantity: Quantity, range: Quantity, cell: unknown): number | Fault {
-  const value = typeof cell === "string" ? readQuantityText(name, quantity, cell) : cell;
+/** The value if it lies in the input's range; `cell` is what was typed, for the message. */
+function inRange(name: string, quantity: Quantity, cell: unknown, value: unknown): number | Fault {
   if (value instanceof Fault) return value;
   const wanted = `type ${article(quantity.name)} such as ${quantity.example}`;
   if (typeof value !== "number") return notNumeric(name, value, wanted);
   if (!Number.isFinite(value)) return badInput(name, `${format(value)} is not a finite number`, wanted);
-  if (value >= range.least && value <= range.most) return value;
+  if (value >= quantity.least && value <= quantity.most) return value;
   const given = typeof cell === "string" ? `"${cell.trim()}"` : format(value, 4);
-  if (value < range.least)
+  if (value < quantity.least)
     return badInput(
       name,
       `${given} is below the lowest value`,
-      `type ${article(quantity.name)} ${atLeast(range)}, such as ${quantity.example}`,
+      `type ${article(quantity.name)} ${atLeast(quantity)}, such as ${quantity.example}`,
     );
   return badInput(
     name,
     `${given} is above the highest value`,
-    `type ${article(quantity.name)} of at most ${bound(range.most, quantity)}`,
+    `type ${article(quantity.name)} of at most ${bound(quantity.most, quantity)}`,
   );
 }
 

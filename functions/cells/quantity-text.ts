@@ -32,6 +32,33 @@ export function readQuantityText(name: string, quantity: Quantity, text: string)
 
 const plainNumber = /^([+-]?(?:\d[\d.,]*|[.,]\d+))(?:[eE]([+-]?\d+))?\s*(.*)$/;
 
+/**
+ * Reads quantity text for one input, remembering the last unit: the rows of a column mostly share it, and then only
+ * the number in front is left to read.
+ */
+export function quantityTextReader(name: string, quantity: Quantity): (text: string) => number | Fault {
+  let suffix = "";
+  let conversion: Conversion = { scale: 1, offset: 0 };
+  return (text) => {
+    if (suffix !== "" && text.endsWith(suffix) && !baseTwoOrSixteen(text)) {
+      const digits = text.slice(0, -suffix.length);
+      const value = Number(digits);
+      if (value - value === 0 && digits.trim() !== "") return value * conversion.scale + conversion.offset;
+    }
+    const value = readQuantityText(name, quantity, text);
+    const unit = value instanceof Fault ? undefined : plainNumber.exec(text)?.[3];
+    const known = unit ? conversionTo(quantity, unit.trim()) : undefined;
+    if (unit && known) [suffix, conversion] = [unit, known];
+    return value;
+  };
+}
+
+/** Number() would take "0x1F" for 31. */
+function baseTwoOrSixteen(text: string): boolean {
+  const second = text.charCodeAt(1) | 32;
+  return second === 120 || second === 98 || second === 111;
+}
+
 const typeset = /^−|^[+-]?[\d.,]*\s*(?:[×xX*·]\s*)?10\^?\(?[⁰¹²³⁴-⁹⁻⁺+\d-]|^[+-]?10\^/;
 
 /** Typeset numbers: true minus, superscript powers, "1.5×10^17", "1.5 x 10^17", "10^17". */
