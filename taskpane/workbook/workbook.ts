@@ -32,6 +32,8 @@ export interface Workbook {
   selection(): Promise<CellPlace | undefined>;
   /** Calls back whenever another cell is selected; returns how to stop that. */
   onSelection(listener: (place: CellPlace) => void): () => void;
+  /** Whether a cell holds anything that writing to it would destroy: a value, a formula, a part of a spill. */
+  isFilled(place: CellPlace): Promise<boolean>;
   /** Writes formulas or values (null leaves a cell as it is) from the given cell on, to the right and down. */
   write(from: CellPlace, cells: (string | number | boolean | null)[][]): Promise<void>;
   /** Selects a cell and brings it into view. */
