@@ -1,8 +1,10 @@
 import type { Entry, Family } from "./cells/entry";
 import { edge } from "./edge/entries";
+import { helpers } from "./helpers/entries";
+import { wall } from "./wall/entries";
 
 /** All families in the catalogue's order: what the pane, the check functions and the tests iterate over. */
-export const families: readonly Family[] = [edge];
+export const families: readonly Family[] = [edge, wall];
 
 export const catalogue: readonly Entry[] = families.flatMap((family) => family.entries);
 

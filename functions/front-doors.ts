@@ -1,10 +1,12 @@
 import * as edge from "./edge/functions";
+import * as helpers from "./helpers/functions";
+import * as wall from "./wall/functions";
 
 export type FrontDoor = (...cells: any[]) => any[][];
 
 /** Every custom function by its name. The enums that stand beside them in their files are left out. */
 export const frontDoors: Readonly<Record<string, FrontDoor>> = Object.fromEntries(
-  [edge]
+  [edge, wall]
     .flatMap((family) => Object.entries(family) as [string, unknown][])
     .filter((named): named is [string, FrontDoor] => typeof named[1] === "function"),
 );
