@@ -4,7 +4,11 @@ import { helpers } from "./helpers/entries";
 import { wall } from "./wall/entries";
 
 /** All families in the catalogue's order: what the pane, the check functions and the tests iterate over. */
-export const families: readonly Family[] = [edge, wall];
+export const families: readonly Family[] = [
+  edge,
+  wall,
+  helpers,
+];
 
 export const catalogue: readonly Entry[] = families.flatMap((family) => family.entries);
 

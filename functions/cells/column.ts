@@ -3,6 +3,7 @@ import { indexIn, shapeOf } from "./broadcast";
 import { Fault } from "./fault";
 import { isCellError, passOn, toCellError, type CellError } from "./host";
 import type { Input } from "./inputs";
+import { take } from "./scratch";
 
 /** A required cell that is blank. */
 export const BLANK = Symbol("blank");
@@ -32,7 +33,7 @@ export function readColumn(input: Input, cells: Cells): Column {
   const { rows, columns } = shape;
   const { least, most, zeroIsValue } = input;
   const floats = !input.words && input.kind === "quantity" && (!input.optional || typeof input.blank === "number");
-  const values: any = floats ? new Float64Array(rows * columns) : new Array(rows * columns);
+  const values: any = floats ? take(rows * columns) : new Array(rows * columns);
   let odd: Column["odd"];
   let index = 0;
   for (let i = 0; i < rows; i++) {

@@ -7,6 +7,7 @@ import type { Input } from "./inputs";
 import { readOutputUnit, type Conversion } from "./quantity-text";
 import type { Quantity } from "./quantities";
 import { applyRows, unexpected } from "./rows";
+import { giveBack } from "./scratch";
 
 export type Result = (Value | CellError)[][];
 
@@ -103,7 +104,9 @@ function evaluateRows(entry: Entry<any>, args: readonly unknown[], result: Quant
     return other instanceof Fault ? toCellError(other) : (other as Value);
   };
   const isSpecial = odd || others ? (index: number) => odd?.[index] === 1 || others?.has(index) === true : undefined;
-  return shape.columns === 1 ? asColumn(numbers, special, isSpecial) : asTable(numbers, shape, special, isSpecial);
+  const out = shape.columns === 1 ? asColumn(numbers, special, isSpecial) : asTable(numbers, shape, special, isSpecial);
+  giveBack([...values, numbers]);
+  return out;
 }
 
 type Special = (index: number) => Value | CellError;

@@ -119,7 +119,7 @@ function findConversion(quantity: Quantity, unitText: string): Conversion | unde
 }
 
 /** How an oscilloscope or a match network states an amplitude: "Vpp", "kV p-p", "Vrms", "V peak". */
-function readSwing(unitText: string): Conversion | undefined {
+export function readSwing(unitText: string): Conversion | undefined {
   const parts = /^(.*V)\s*_?(pp|p-p|pk-pk|peak-to-peak|rms|p|pk|peak|0-p|zero-to-peak)$/i.exec(unitText.trim());
   const unit = parts && parseUnit(parts[1]);
   if (!unit || unit.dimension !== parseUnit("V")!.dimension) return undefined;

@@ -1,4 +1,5 @@
 import { Fault } from "./fault";
+import { take } from "./scratch";
 
 type Compute = (...values: any[]) => unknown;
 type Values = ArrayLike<any>;
@@ -15,7 +16,7 @@ export interface Computed {
  * are skipped; a row that throws gets a Fault of its own.
  */
 export function applyRows(compute: Compute, columns: readonly Values[], size: number, odd?: Uint8Array): Computed {
-  const out: Out = { numbers: new Float64Array(size), others: undefined };
+  const out: Out = { numbers: take(size), others: undefined };
   const rows = loops[columns.length] ?? anyNumber;
   for (let from = 0; from < size;) {
     const stopped = attempt(rows, compute, columns, size, odd, out, from);
