@@ -7,6 +7,8 @@ export default defineConfig({
         define: { WALLFALL_VERSION: JSON.stringify("test"), WALLFALL_BUILT: JSON.stringify("2026-01-01") },
         test: {
           name: "unit",
+          // Its ES module has no .mjs name, so Node.js alone would take it for CommonJS.
+          server: { deps: { inline: ["unitmath"] } },
           include: ["test/**/*.test.ts"],
           exclude: ["test/browser/**", "test/bench/**"],
         },

@@ -54,10 +54,10 @@ export function readColumn(input: Input, cells: Cells): Column {
 
 function readBlock(input: Input, cells: Cells): Column {
   const shape = { rows: 1, columns: 1 };
-  if (input.optional && cells.every((row) => row.every((cell) => isBlank(input, cell)))) {
-    return { values: [input.blank], shape, odd: undefined };
+  if (cells.every((row) => row.every((cell) => isBlank(input, cell)))) {
+    return { values: [input.blank], shape, odd: input.optional ? undefined : new Map([[0, BLANK]]) };
   }
-  const error = cells.flat().find(isCellError);
+  const error = input.seesErrors ? undefined : cells.flat().find(isCellError);
   const value = error === undefined ? input.read(cells) : passOn(error, input.name);
   const odd = value instanceof Fault ? toCellError(value) : error === undefined ? undefined : (value as CellError);
   return { values: [value], shape, odd: odd && new Map([[0, odd]]) };

@@ -40,7 +40,7 @@ export interface Facts<I extends readonly Input<any>[]> {
   inputs: I;
   result: Quantity | Table;
   /** Numbers in the inputs' own units in, the result's own unit out; a Fault where the model has no solution. */
-  compute: (...values: ValuesOf<I>) => number | string | Value[][] | Fault;
+  compute: (...values: ValuesOf<I>) => number | string | (Value | Fault)[][] | Fault;
   /** The equation for display, TeX. */
   equation: string;
   limits?: readonly Limit<ValuesOf<I>>[];
@@ -59,7 +59,7 @@ export interface Entry<I extends readonly Input<any>[] = readonly Input<any>[]> 
   "compute" | "limits"
 > {
   name: string;
-  compute: (...values: any[]) => number | string | Value[][] | Fault;
+  compute: (...values: any[]) => number | string | (Value | Fault)[][] | Fault;
   limits: readonly Limit[];
   /** Whether a last argument [unit] follows the inputs. */
   takesUnit: boolean;

@@ -203,10 +203,11 @@ function tableOverRow(entry: Entry, shape: Shape): Fault {
 
 function finishTable(entry: Entry<any>, table: unknown): Result {
   if (table instanceof Fault) return [[toCellError(table)]];
-  const rows = table as Value[][];
+  const rows = table as (Value | Fault)[][];
   return rows.map((row) =>
-    row.map((value) =>
-      typeof value !== "number" || value - value === 0 ? value : toCellError(notFinite(entry, value)),
-    ),
+    row.map((value) => {
+      if (value instanceof Fault) return toCellError(value);
+      return typeof value !== "number" || value - value === 0 ? value : toCellError(notFinite(entry, value));
+    }),
   );
 }

@@ -23,6 +23,8 @@ export interface Input<T = unknown> {
   words?: readonly string[];
   /** "ion" for chemical formulas, "flag" for TRUE or FALSE, "block" for a whole range read at once. */
   kind: "quantity" | "ion" | "words" | "flag" | "text" | "block";
+  /** Set for a block that deals with error cells itself, so that one does not spoil the rest. */
+  seesErrors?: true;
   /** The value in a cell that is neither blank nor an error; for a block, in all its cells. */
   read(cell: unknown): T | Fault;
 }

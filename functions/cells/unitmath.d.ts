@@ -1,5 +1,5 @@
 /** The part of UnitMath that units.ts uses; the package's own types describe another version. */
-declare module "unitmath" {
+declare module "unitmath/src/Unit.js" {
   interface MathUnit {
     dimension: number[];
     getNormalizedValue(): number;

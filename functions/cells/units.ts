@@ -1,4 +1,4 @@
-import UnitMath from "unitmath";
+import UnitMath from "unitmath/src/Unit.js";
 import { e, k_B, u } from "../matter/constants";
 
 /**

@@ -7,6 +7,7 @@ import { readSwing } from "../cells/quantity-text";
 import { parseUnit, type Unit } from "../cells/units";
 import { constants } from "../matter/constants";
 import { CIAAW, CODATA } from "../sources";
+import { built, version } from "../version";
 import { convertUnit } from "./model";
 
 const first = { "1.0.0": "first version" };
@@ -53,16 +54,13 @@ export const UNIT = entry("UNIT", {
   accuracy: "closed form, 4 ulp",
 });
 
-declare const WALLFALL_VERSION: string;
-declare const WALLFALL_BUILT: string;
-
 /** Rows of ABOUT; the front door knows how many functions there are. */
 export function aboutRows(functionCount: number): (string | number)[][] {
   return [
-    ["Wallfall version", WALLFALL_VERSION],
+    ["Wallfall version", version],
     ["constants", "CODATA 2022"],
     ["functions", functionCount],
-    ["built", WALLFALL_BUILT],
+    ["built", built],
   ];
 }
 
