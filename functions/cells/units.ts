@@ -146,9 +146,10 @@ export function normalizeUnit(text: string): string {
     .replace(/\bper\b/g, "/")
     .replace(/[A-Za-z]+/g, (word) => (Object.hasOwn(spellings, word) ? spellings[word] : word))
     .replace(/([A-Za-z])\s?([-+]?\d)/g, (_, letter: string, power: string) => `${letter}^${power.replace("+", "")}`)
-    .replace(/\^\s*\(?\s*\+?(-?\d+(?:\.\d+)?)\s*(?:\/\s*(\d+))?\s*\)?/g, (whole, top: string, bottom?: string) =>
-      // "eV^(-3/2)" is a power; "m^2/4" would not be a unit anyway.
-      whole.includes("(") || !bottom ? `^${Number(top) / Number(bottom ?? 1)}` : whole,
+    .replace(
+      // "eV^(-3/2)" and "eV^-3/2" are powers; "m^2/4" would not be a unit anyway.
+      /\^\s*\(?\s*\+?(-?\d+(?:\.\d+)?)(?:\s*\/\s*(\d+))?(?:\s*\))?/g,
+      (_, top: string, bottom = "1") => `^${Number(top) / Number(bottom)}`,
     );
 }
 
