@@ -1,20 +1,37 @@
 import { NotTested, type Limit } from "../cells/entry";
-import type { Ion } from "../matter/ion";
+import type { Fault } from "../cells/fault";
+import { coldIons } from "../edge/limits";
 import { m_e } from "../matter/constants";
-import { HW67, LL, S12 } from "../sources";
-import { electronExcess } from "./model";
+import type { Ion } from "../matter/ion";
+import { CP, HW67, LL, S12 } from "../sources";
+import { electronExcess, ionEmission } from "./model";
+import { firstExcitation, ionisationEnergy } from "./rare-gases";
+
+/** What the limits look at: a wall at a potential, or at none where the model has no solution. */
+export interface AtWall {
+  V_w: number | Fault;
+  T_e: number;
+  ion: Ion;
+  T_i: number | undefined;
+  /** Undefined where emission was left out. */
+  delta_e: number | undefined;
+}
+
+type Look = (...values: any[]) => AtWall;
+
+/** Limits of every model in which electrons fall on a wall that repels them. */
+export function sheathLimits(at: Look): Limit[] {
+  return [wallRepels(at), weakEmission(at), maxwellianTail(at), coldIons((...values) => at(...values).T_i)];
+}
 
 /** The picture of a sheath that repels electrons and lets ions in. */
-export function wallRepels(
-  voltage: (...values: any[]) => number | undefined,
-  T_e: (...values: any[]) => number,
-): Limit {
+export function wallRepels(at: (...values: any[]) => Pick<AtWall, "V_w" | "T_e">): Limit {
   return {
     assumption: "the wall repels electrons",
     measure: "V_w/T_e",
     value: (...values) => {
-      const V_w = voltage(...values);
-      return V_w === undefined ? undefined : V_w / T_e(...values);
+      const { V_w, T_e } = at(...values);
+      return typeof V_w === "number" ? V_w / T_e : undefined;
     },
     holds: -1,
     fails: 0,
@@ -24,43 +41,38 @@ export function wallRepels(
 }
 
 /** Far from the space-charge limit of emission; the simple formula is off by 1 % at 25, by 4 % at 13. */
-export function weakEmission(of: (...values: any[]) => [ion: Ion, delta_e: number | undefined]): Limit {
+function weakEmission(at: Look): Limit {
   return {
     assumption: "emitted electrons leave the sheath's structure alone",
     measure: "(1−δ)√(M/(Zm))",
     value: (...values) => {
-      const [ion, delta_e] = of(...values);
+      const { ion, delta_e, ...wall } = at(...values);
+      if (!electronsMatter({ ion, ...wall })) return undefined;
       return delta_e === undefined
         ? new NotTested("delta_e")
         : (1 - delta_e) * Math.sqrt(ion.mass / (ion.charge * m_e));
     },
     holds: 25,
     fails: 8.3,
-    reason: "emission is space-charge limited, and part of it returns to the wall",
+    reason: "emission comes close to its space-charge limit, and the potential no longer follows this formula",
     source: HW67,
   };
 }
 
-/** First excitation energies of the rare gases in eV, all to metastable levels: NIST Atomic Spectra Database (from memory). */
-const firstExcitation: Readonly<Record<string, number>> = { He: 19.82, Ne: 16.62, Ar: 11.55, Kr: 9.92, Xe: 8.32 };
-
-/** The rare gas an ion is of, where it is one. */
-export function rareGas(ion: Ion): string | undefined {
-  return /^(He|Ne|Ar|Kr|Xe)(?=[+^])/.exec(ion.label)?.[0];
-}
-
 /**
  * Electrons that reach the wall come from the tail above e|V_w|: where the gas takes their energy faster than they are
- * replaced, fewer arrive than a Maxwellian has. That twice the threshold is far too much is common practice.
+ * replaced, fewer arrive than a Maxwellian has. That it fails at twice the threshold is common practice.
  */
-export function maxwellianTail(of: (...values: any[]) => [ion: Ion, V_w: number | undefined]): Limit {
+export function maxwellianTail(at: (...values: any[]) => Omit<AtWall, "delta_e">): Limit {
   return {
     assumption: "the electrons that cross the sheath are Maxwellian",
     measure: "|V_w|/first excitation energy",
     value: (...values) => {
-      const [ion, V_w] = of(...values);
-      const threshold = firstExcitation[rareGas(ion) ?? ""];
-      return threshold === undefined || V_w === undefined ? undefined : Math.max(0, -V_w) / threshold;
+      const wall = at(...values);
+      const threshold = firstExcitation(wall.ion);
+      return threshold !== undefined && electronsMatter(wall) && typeof wall.V_w === "number"
+        ? Math.max(0, -wall.V_w) / threshold
+        : undefined;
     },
     holds: 1,
     fails: 2,
@@ -69,15 +81,20 @@ export function maxwellianTail(of: (...values: any[]) => [ion: Ion, V_w: number 
   };
 }
 
+/** At a strong bias hardly an electron arrives, and nothing that concerns them matters. */
+function electronsMatter({ V_w, T_e, ion, T_i }: Omit<AtWall, "delta_e">): boolean {
+  return typeof V_w === "number" && electronExcess(T_e, ion, T_i ?? 0) * Math.exp(Math.min(0, V_w / T_e)) > 0.01;
+}
+
 /** In a strong field at an angle, the Debye sheath lives only above the grazing limit asin(4u_B/v̄_e). */
 export function aboveGrazing(
-  of: (...values: any[]) => [angle: number | undefined, T_e: number, ion: Ion, T_i: number | undefined],
+  of: (...values: any[]) => { angle: number | undefined; T_e: number; ion: Ion; T_i: number | undefined },
 ): Limit {
   return {
     assumption: "the field meets the wall steeply enough for a Debye sheath",
     measure: "angle/grazing limit",
     value: (...values) => {
-      const [angle, T_e, ion, T_i] = of(...values);
+      const { angle, T_e, ion, T_i } = of(...values);
       if (angle === undefined) return undefined;
       return (angle * Math.PI) / 180 / Math.asin(Math.min(1, 1 / electronExcess(T_e, ion, T_i ?? 0)));
     },
@@ -86,4 +103,30 @@ export function aboveGrazing(
     reason: "at such a grazing angle the magnetic presheath carries the whole drop",
     source: S12,
   };
+}
+
+/** Emission by the ions themselves adds to the current they carry. */
+export function weakIonEmission(measure: string, gamma: (...values: any[]) => number | undefined): Limit {
+  return {
+    assumption: "emission by ion impact is small beside the ion current",
+    measure,
+    value: gamma,
+    holds: 0.05,
+    fails: 0.3,
+    reason: "the electrons that ions set free carry a large share of the current",
+    source: LL,
+  };
+}
+
+/** Where only the ion is known, its yield on a clean metal of 4.5 eV, tungsten say, stands in. */
+export function weakIonEmissionFromMetal(ion: (...values: any[]) => Ion): Limit {
+  return weakIonEmission("γ_i on a metal of 4.5 eV", (...values) => {
+    const energy = ionisationEnergy(ion(...values));
+    return energy === undefined ? undefined : ionEmission(energy, 4.5);
+  });
+}
+
+/** An assumption that no input of the function can test: the user is told what to look at. */
+export function besideTheInputs(needs: string, limit: Omit<Limit, "value" | "source">): Limit {
+  return { ...limit, value: () => new NotTested(needs), source: CP };
 }
