@@ -1,0 +1,89 @@
+import { prettyUnit } from "../../functions/cells/format";
+import type { Quantity } from "../../functions/cells/quantities";
+import type { Field } from "./fields";
+import { h, setAttribute } from "./h";
+import { inputFacts, unitOf } from "./input-facts";
+import { labels } from "./labels";
+import { unitsOffered } from "./units-offered";
+
+/** A control with its words, and the two things that can be said of what stands in it. */
+export interface FieldView {
+  element: HTMLElement;
+  control: HTMLInputElement | HTMLSelectElement | HTMLTextAreaElement;
+  /** Shows why the value is doubted, and whether the function refused it. */
+  mark(doubt: string | undefined, refused: boolean): void;
+}
+
+type Control = FieldView["control"];
+
+export function fieldView({ name, meaning, input }: Field & { input: object }, text: string): FieldView {
+  const id = `wallfall-input-${name}`;
+  const facts = inputFacts(input);
+  const unit = unitOf(input);
+  const doubtNote = h("p", { class: "doubt", id: `${id}-doubt`, hidden: true });
+  const control = controlFor(input, id, text);
+  const element = h(
+    "div",
+    { class: "field" },
+    h(
+      "div",
+      { class: "naming" },
+      h(
+        "label",
+        { for: id },
+        h("span", { class: "symbol" }, name),
+        input.optional && h("span", { class: "optional" }, ` ${labels.optional}`),
+      ),
+      h("p", { class: "meaning", id: `${id}-meaning` }, meaning, facts && h("span", { class: "facts" }, ` ${facts}.`)),
+    ),
+    h("div", { class: "entry" }, control, unit && h("span", { class: "unit" }, unit)),
+    doubtNote,
+  );
+  const describe = (...ids: string[]) => control.setAttribute("aria-describedby", ids.join(" "));
+  describe(`${id}-meaning`);
+  const mark = (doubt: string | undefined, refused: boolean) => {
+    doubtNote.hidden = doubt === undefined;
+    doubtNote.textContent = doubt === undefined ? "" : `${labels.doubtfulInput}: ${doubt}`;
+    setAttribute(control, "aria-invalid", refused && "true");
+    describe(
+      `${id}-meaning`,
+      ...(doubt === undefined ? [] : [`${id}-doubt`]),
+      ...(refused ? ["wallfall-outcome"] : []),
+    );
+  };
+  return { element, control, mark };
+}
+
+function controlFor(input: NonNullable<Field["input"]>, id: string, text: string): Control {
+  if (input.kind === "words") return choice(id, input.words ?? [], input.optional, text);
+  if (input.kind === "flag") return choice(id, ["TRUE", "FALSE"], input.optional, text);
+  const typing = { id, spellcheck: "false", autocomplete: "off", autocapitalize: "off" };
+  if (input.kind === "block") {
+    const area = h("textarea", { ...typing, rows: 3 });
+    area.value = text;
+    return area;
+  }
+  const field = h("input", { ...typing, type: "text" });
+  field.value = text;
+  return field;
+}
+
+function choice(id: string, words: readonly string[], optional: boolean, text: string): HTMLSelectElement {
+  const blank = optional || text === "" ? [h("option", { value: "" }, "(blank)")] : [];
+  const select = h("select", { id }, ...blank, ...words.map((word) => h("option", { value: word }, word)));
+  select.value = words.find((word) => word.toLowerCase() === text.toLowerCase()) ?? "";
+  return select;
+}
+
+/** The unit in which the result is wanted: blank is the function's own. */
+export function unitChoice(quantity: Quantity, text: string): HTMLSelectElement {
+  const [own, ...others] = unitsOffered(quantity);
+  const select = h(
+    "select",
+    { id: "wallfall-unit" },
+    h("option", { value: "" }, prettyUnit(own)),
+    ...others.map((unit) => h("option", { value: unit }, prettyUnit(unit))),
+  );
+  select.value = text;
+  return select;
+}
