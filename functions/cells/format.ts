@@ -3,10 +3,11 @@ export function format(value: number, digits = 3): string {
   if (!Number.isFinite(value)) return value > 0 ? "∞" : value < 0 ? "−∞" : "no number";
   if (value === 0) return "0";
   const size = Math.abs(value);
-  const text = size >= 1e5 || size < 1e-3 ? value.toExponential(digits - 1) : value.toPrecision(digits);
+  if (size < 1e5 && size >= 1e-3) return String(Number(value.toPrecision(digits)));
+  const text = value.toExponential(digits - 1);
   const [mantissa, power] = text.split("e");
   const short = mantissa.includes(".") ? mantissa.replace(/\.?0+$/, "") : mantissa;
-  return power === undefined ? short : `${short}e${Number(power)}`;
+  return `${short}e${Number(power)}`;
 }
 
 /** A unit as print shows it: "m^-3" → "m⁻³". */

@@ -1,7 +1,7 @@
 import { FormulaError } from "../matter/formula";
 import { ionOfMass, parseIon, type Ion } from "../matter/ion";
 import { badInput, Fault } from "./fault";
-import { format } from "./format";
+import { format, prettyUnit } from "./format";
 import { quantities, type Band, type Quantity } from "./quantities";
 import { article, conversionTo, quantityTextReader, readQuantityText } from "./quantity-text";
 
@@ -233,7 +233,7 @@ export function doubtOf(input: Input, cell: unknown): string | undefined {
   const size = input.least < 0 && input.least !== Number.MIN_VALUE ? cell : Math.abs(cell);
   const hint = size < low ? (below ?? "unusually small") : size > high ? (above ?? "unusually large") : undefined;
   if (hint === undefined) return undefined;
-  const unit = input.kind === "ion" ? "u" : (input.quantity?.unit ?? "");
+  const unit = input.kind === "ion" ? "u" : prettyUnit(input.quantity?.unit ?? "");
   return `${input.name} ${format(cell)} ${unit}`.trimEnd() + `; ${hint}`;
 }
 
