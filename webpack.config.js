@@ -3,8 +3,14 @@ import { fileURLToPath } from "node:url";
 import CopyPlugin from "copy-webpack-plugin";
 import { EsbuildPlugin } from "esbuild-loader";
 import MiniCssExtractPlugin from "mini-css-extract-plugin";
-import { FunctionsJsonPlugin } from "./manifest/build/functions-json.js";
 import webpack from "webpack";
+import { FunctionsJsonPlugin } from "./manifest/build/functions-json.js";
+import { allowVendor, fromVendor, hostLibrary } from "./manifest/build/host-library.js";
+import { IconsPlugin } from "./manifest/build/icons.js";
+import { Licences } from "./manifest/build/licences.js";
+import { policy, PolicyPlugin } from "./manifest/build/policy.js";
+import { SizePlugin } from "./manifest/build/size.js";
+import { ManifestPlugin, readOrigin } from "./manifest/build/stamp.js";
 
 const at = (path) => fileURLToPath(new URL(path, import.meta.url));
 const { version } = JSON.parse(readFileSync(at("package.json"), "utf8"));
@@ -17,7 +23,7 @@ const frontDoors = () =>
 
 const freeze = at("manifest/build/freeze-loader.js");
 
-/** Shared by all pages; each page is a configuration of its own, so that none leaks into another's bundle. */
+/** Shared by all bundles; each is a configuration of its own, so that none leaks into another. */
 const common = (origin) => ({
   mode: "production",
   devtool: false,
@@ -44,25 +50,60 @@ const common = (origin) => ({
   ],
 });
 
-/** A page is written by hand: its HTML is copied as it stands, its script and style are bundled. */
-const html = (path) => new CopyPlugin({ patterns: [{ from: at(path), to: "[name][ext]" }] });
-
+/**
+ * Options, each as --env NAME=VALUE: `origin` the address the files will be served under, `office` "hosted" to take the
+ * host's library from its vendor instead of from the build, `id` and `name` for an organisation's own copy.
+ */
 export default (env = {}) => {
-  const origin = (env.origin ?? "https://localhost:3000").replace(/\/+$/, "");
+  const origin = readOrigin(env.origin);
+  const hosted = env.office === "hosted";
+  const licences = new Licences();
+
   const bundle = (name, entry, ...plugins) => {
     const base = common(origin);
-    return { ...base, name, entry: { [name]: at(entry) }, plugins: [...base.plugins, ...plugins] };
+    return {
+      ...base,
+      name,
+      entry: { [name]: at(entry) },
+      output: { ...base.output, chunkFilename: `${name}/[id].js` },
+      plugins: [...base.plugins, licences.collector(), ...plugins],
+    };
   };
   const styled = (name, folder) =>
+    bundle(name, `${folder}/index.ts`, new MiniCssExtractPlugin({ filename: "[name].css" }));
+  const bundles = [
     bundle(
-      name,
-      `${folder}/index.ts`,
-      new MiniCssExtractPlugin({ filename: "[name].css" }),
-      html(`${folder}/${name}.html`),
-    );
-  return [
-    bundle("functions", "functions/register.ts", new FunctionsJsonPlugin({ files: frontDoors, origin })),
+      "functions",
+      "functions/register.ts",
+      new FunctionsJsonPlugin({ files: frontDoors, origin }),
+      new SizePlugin({ asset: "functions.js", limit: 60 * 1024 }),
+    ),
     styled("taskpane", "taskpane"),
     styled("trial", "taskpane/trial"),
   ].filter(({ entry }) => Object.values(entry).every((file) => existsSync(file)));
+
+  /** Pages are written by hand and copied as they stand. */
+  const page = (from, transform) => ({ from: at(from), to: "[name][ext]", transform, noErrorOnMissing: true });
+  const hostPage = hosted ? (html) => fromVendor(html.toString()) : undefined;
+  const site = {
+    ...common(origin),
+    name: "site",
+    entry: {},
+    dependencies: bundles.map(({ name }) => name),
+    plugins: [
+      new CopyPlugin({
+        patterns: [
+          page("manifest/functions.html", hostPage),
+          page("taskpane/taskpane.html", hostPage),
+          page("taskpane/trial/trial.html"),
+          ...hostLibrary(hosted),
+        ],
+      }),
+      new IconsPlugin(),
+      new ManifestPlugin({ origin, version, id: env.id, name: env.name }),
+      new PolicyPlugin(hosted ? allowVendor(policy) : policy),
+      licences.lister(),
+    ],
+  };
+  return [...bundles, site];
 };
