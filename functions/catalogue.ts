@@ -1,12 +1,14 @@
 import type { Entry, Family } from "./cells/entry";
 import { edge } from "./edge/entries";
 import { helpers } from "./helpers/entries";
+import { magnetised } from "./magnetised/entries";
 import { wall } from "./wall/entries";
 
 /** All families in the catalogue's order: what the pane, the check functions and the tests iterate over. */
 export const families: readonly Family[] = [
   edge,
   wall,
+  magnetised,
   helpers,
 ];
 

@@ -1,5 +1,6 @@
 import * as edge from "./edge/functions";
 import * as helpers from "./helpers/functions";
+import * as magnetised from "./magnetised/functions";
 import * as wall from "./wall/functions";
 
 export type FrontDoor = (...cells: any[]) => any[][];
@@ -9,6 +10,7 @@ export const frontDoors: Readonly<Record<string, FrontDoor>> = Object.fromEntrie
   [
   edge,
   wall,
+  magnetised,
   helpers,
 ]
     .flatMap((family) => Object.entries(family) as [string, unknown][])
