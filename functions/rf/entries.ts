@@ -1,0 +1,97 @@
+import { edge_ratio, lambda_i, n_bulk, n_edge, T_e } from "../cells/common-inputs";
+import { entry, type Family } from "../cells/entry";
+import { badInput } from "../cells/fault";
+import { ionInput, optional, quantityInput, wordInput } from "../cells/inputs";
+import { quantities } from "../cells/quantities";
+import { manyInDebyeSphere } from "../edge/limits";
+import { BB68, GE62, L88, L89, LL } from "../sources";
+import { highVoltage, manyPeriodsInTransit, neverReverses, pathSuitsModel, repelsAtTheTop } from "./limits";
+import * as model from "./model";
+
+const first = { "1.0.0": "first version" };
+const closedForm = "closed form, 4 ulp";
+
+/** The mean drop across the sheath, a magnitude: no drop at all is a blank, not a sheath. */
+const V_dc = quantityInput("V_dc", quantities.drop, { zeroIsValue: false });
+const V_rf = quantityInput("V_rf", quantities.amplitude);
+const s_m = quantityInput("s_m", quantities.length);
+
+export const RFFLOATINGSHIFT = entry("RFFLOATINGSHIFT", {
+  inputs: [V_rf, T_e],
+  result: quantities.voltage,
+  compute: model.rfFloatingShift,
+  equation: String.raw`\Delta V_f = -T_e \ln I_0\!\left(\frac{V_\mathrm{rf}}{T_e}\right)`,
+  limits: [repelsAtTheTop((V_rf, T_e) => [V_rf, T_e])],
+  sources: [GE62],
+  changes: first,
+  example: [30, 3],
+  accuracy: `${closedForm}, at any amplitude`,
+});
+
+export const IONENERGYSPREAD = entry("IONENERGYSPREAD", {
+  inputs: [V_dc, V_rf, quantityInput("s", quantities.length), quantityInput("f", quantities.frequency), ionInput()],
+  result: quantities.energy,
+  compute: (V_dc, V_rf, s, f, ion) => model.ionEnergySpread(Math.abs(V_dc), V_rf, s, f, ion),
+  equation: String.raw`\Delta E = \frac{8 Z V_\mathrm{rf}}{3\,\omega s} \sqrt{\frac{2 Z e V_\mathrm{dc}}{M}} \;\le\; 2 Z V_\mathrm{rf}, \qquad \omega = 2\pi f`,
+  limits: [
+    manyPeriodsInTransit((V_dc, _V_rf, s, f, ion) => f * model.rfTransitTime(Math.abs(V_dc), s, ion)),
+    neverReverses((V_dc, V_rf) => [V_rf, V_dc]),
+  ],
+  sources: [BB68],
+  changes: first,
+  example: [300, 100, 0.005, 13.56e6, "Ar+"],
+  accuracy: closedForm,
+});
+
+export const RFCHILDCURRENT = entry("RFCHILDCURRENT", {
+  inputs: [
+    V_dc,
+    s_m,
+    ionInput(),
+    optional(wordInput("model", model.rfChildModels), "collisionless"),
+    optional(lambda_i),
+  ],
+  result: quantities.currentDensity,
+  compute: (V_dc, s_m, ion, word, lambda_i) => {
+    const V = Math.abs(V_dc);
+    if (word === "collisionless") return model.rfChildCurrent(V, s_m, ion);
+    return lambda_i === undefined
+      ? badInput("lambda_i", 'it is blank while model is "collisional"', "type a mean free path such as 1 mm")
+      : model.rfChildCurrentCollisional(V, s_m, ion, lambda_i);
+  },
+  equation: String.raw`J = \begin{cases} \dfrac{200}{243}\,\varepsilon_0 \sqrt{\dfrac{2Ze}{M}}\, \dfrac{V_\mathrm{dc}^{3/2}}{s_m^2} & \text{collisionless} \\ 1.678148\,\varepsilon_0 \sqrt{\dfrac{2Ze}{M}}\, \dfrac{V_\mathrm{dc}^{3/2} \lambda_i^{1/2}}{s_m^{5/2}} & \text{collisional} \end{cases}`,
+  limits: pathSuitsModel((_V_dc, s_m, _ion, word, lambda_i) => [s_m, word, lambda_i]),
+  sources: [L88, L89],
+  changes: first,
+  example: [300, 0.005, "Ar+"],
+  accuracy: closedForm,
+});
+
+export const RFSHEATHWIDTH = entry("RFSHEATHWIDTH", {
+  inputs: [V_dc, n_edge, T_e],
+  result: quantities.length,
+  compute: (V_dc, n_edge, T_e) => model.rfSheathWidth(Math.abs(V_dc), n_edge, T_e),
+  equation: String.raw`s_m = \sqrt{\frac{50}{27}}\, \frac{\sqrt 2}{3}\, \lambda_D \left(\frac{2 V_\mathrm{dc}}{T_e}\right)^{3/4}`,
+  limits: [highVoltage((V_dc, _n_edge, T_e) => [V_dc, T_e]), manyInDebyeSphere((_V_dc, n_edge, T_e) => [n_edge, T_e])],
+  sources: [L88],
+  changes: first,
+  example: [300, 1e16, 3],
+  accuracy: closedForm,
+});
+
+export const SHEATHRESISTANCE = entry("SHEATHRESISTANCE", {
+  inputs: [n_bulk, T_e, ionInput(), edge_ratio],
+  result: quantities.resistance,
+  compute: (n_bulk, T_e, ion, edge_ratio) => model.sheathResistance(edge_ratio * n_bulk, T_e, ion),
+  equation: String.raw`R = \left|\frac{\mathrm{d}J}{\mathrm{d}V_w}\right|^{-1}_{V_f} = \frac{T_e}{e\, n_\mathrm{edge}\, u_B}`,
+  limits: [manyInDebyeSphere((n_bulk, T_e, _ion, edge_ratio) => [edge_ratio * n_bulk, T_e])],
+  sources: [LL],
+  changes: first,
+  example: [1e17, 3, "Ar+"],
+  accuracy: closedForm,
+});
+
+export const rf: Family = {
+  title: "RF: a driven wall",
+  entries: [RFFLOATINGSHIFT, IONENERGYSPREAD, RFCHILDCURRENT, RFSHEATHWIDTH, SHEATHRESISTANCE],
+};
