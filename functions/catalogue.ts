@@ -1,13 +1,19 @@
 import type { Entry, Family } from "./cells/entry";
 import { edge } from "./edge/entries";
 import { helpers } from "./helpers/entries";
+import { ionMix } from "./ion-mix/entries";
 import { magnetised } from "./magnetised/entries";
+import { negativeIons } from "./negative-ions/entries";
+import { rf } from "./rf/entries";
 import { wall } from "./wall/entries";
 
 /** All families in the catalogue's order: what the pane, the check functions and the tests iterate over. */
 export const families: readonly Family[] = [
   edge,
   wall,
+  rf,
+  negativeIons,
+  ionMix,
   magnetised,
   helpers,
 ];

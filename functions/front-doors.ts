@@ -1,6 +1,9 @@
 import * as edge from "./edge/functions";
 import * as helpers from "./helpers/functions";
+import * as ionMix from "./ion-mix/functions";
 import * as magnetised from "./magnetised/functions";
+import * as negativeIons from "./negative-ions/functions";
+import * as rf from "./rf/functions";
 import * as wall from "./wall/functions";
 
 export type FrontDoor = (...cells: any[]) => any[][];
@@ -10,6 +13,9 @@ export const frontDoors: Readonly<Record<string, FrontDoor>> = Object.fromEntrie
   [
   edge,
   wall,
+  rf,
+  negativeIons,
+  ionMix,
   magnetised,
   helpers,
 ]
