@@ -1,5 +1,6 @@
 import type { Source } from "../sources";
 import type { Fault } from "./fault";
+import type { CellError } from "./host";
 import type { Input } from "./inputs";
 import type { Quantity } from "./quantities";
 
@@ -38,9 +39,11 @@ export class NotTested {
 
 export interface Facts<I extends readonly Input<any>[]> {
   inputs: I;
+  /** An input that may follow those, any number of times. */
+  repeats?: Input<any>;
   result: Quantity | Table;
   /** Numbers in the inputs' own units in, the result's own unit out; a Fault where the model has no solution. */
-  compute: (...values: ValuesOf<I>) => number | string | (Value | Fault)[][] | Fault;
+  compute: (...values: ValuesOf<I>) => number | string | (Value | CellError)[][] | Fault;
   /** The equation for display, TeX. */
   equation: string;
   limits?: readonly Limit<ValuesOf<I>>[];
@@ -59,7 +62,7 @@ export interface Entry<I extends readonly Input<any>[] = readonly Input<any>[]> 
   "compute" | "limits"
 > {
   name: string;
-  compute: (...values: any[]) => number | string | (Value | Fault)[][] | Fault;
+  compute: (...values: any[]) => number | string | (Value | CellError)[][] | Fault;
   limits: readonly Limit[];
   /** Whether a last argument [unit] follows the inputs. */
   takesUnit: boolean;

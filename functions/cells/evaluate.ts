@@ -165,14 +165,15 @@ function unitInput(result: Quantity): Input<Conversion | undefined> {
   };
 }
 
-function notFinite(entry: Entry, value: number): Fault {
+export function notFinite(entry: Entry, value: number): Fault {
   const what = Number.isNaN(value) ? "has no value" : "is larger than any number a cell can hold";
   return new Fault("#N/A", `${entry.name}: the result ${what} at these inputs; check their units and sizes.`);
 }
 
 /** A table spills from one set of inputs; where every set gives a single row, a column of sets gives a column of rows. */
 function evaluateTable(entry: Entry<any>, args: readonly unknown[]): Result {
-  const reading = readInputs(entry.inputs, args);
+  const inputs = inputsFor(entry, args.length);
+  const reading = readInputs(inputs, args);
   if (reading instanceof Fault) return [[toCellError(reading)]];
   const { shape, columns, odd } = reading;
   const size = shape.rows * shape.columns;
@@ -185,16 +186,22 @@ function evaluateTable(entry: Entry<any>, args: readonly unknown[]): Result {
   );
   const width = isTable(entry.result) ? entry.result.columns.length : 1;
   if (size === 1) {
-    if (odd?.[0]) return [[oddResult(entry.inputs, reading, 0)]];
+    if (odd?.[0]) return [[oddResult(inputs, reading, 0)]];
     return finishTable(entry, others!.get(0));
   }
   const out: Result = [];
   for (let i = 0; i < size; i++) {
-    const rows = odd?.[i] ? [[oddResult(entry.inputs, reading, i)]] : finishTable(entry, others!.get(i));
+    const rows = odd?.[i] ? [[oddResult(inputs, reading, i)]] : finishTable(entry, others!.get(i));
     if (rows.length !== 1) return [[toCellError(tableOverRow(entry, shape))]];
     out.push([...rows[0], ...new Array(width - rows[0].length).fill("")]);
   }
   return out;
+}
+
+/** The inputs of a call with so many arguments: where one repeats, as often as it is given. */
+function inputsFor({ inputs, repeats }: Entry, count: number): readonly Input<any>[] {
+  const more = count - inputs.length;
+  return repeats && more > 0 ? [...inputs, ...new Array<Input<any>>(more).fill(repeats)] : inputs;
 }
 
 function tableOverRow(entry: Entry, shape: Shape): Fault {

@@ -11,45 +11,27 @@ export interface Computed {
 }
 
 /**
- * Calls `compute` once per row over columns that hold one value per row, or one value for all. Arguments are passed by
- * position, without an array in between: over long columns that spread costs more than the physics. Rows marked odd
- * are skipped; a row that throws gets a Fault of its own.
+ * Calls `compute` once per row over columns that hold one value per row, or one value for all. Rows marked odd are
+ * skipped; a row that throws gets a Fault of its own.
  */
 export function applyRows(compute: Compute, columns: readonly Values[], size: number, odd?: Uint8Array): Computed {
-  const out: Out = { numbers: take(size), others: undefined };
-  const rows = loops[columns.length] ?? anyNumber;
-  for (let from = 0; from < size;) {
-    const stopped = attempt(rows, compute, columns, size, odd, out, from);
-    if (stopped === undefined) break;
-    keep(out, stopped.row, stopped.fault);
-    from = stopped.row + 1;
+  const numbers = take(size);
+  let others: Computed["others"];
+  const at = caller(compute, columns);
+  let row = 0;
+  while (row < size) {
+    try {
+      for (; row < size; row++) {
+        if (odd !== undefined && odd[row] !== 0) continue;
+        const result = at(row);
+        if (typeof result === "number") numbers[row] = result;
+        else (others ??= new Map()).set(row, result);
+      }
+    } catch (error) {
+      (others ??= new Map()).set(row++, unexpected(error));
+    }
   }
-  return out;
-}
-
-type Out = Computed;
-
-function keep(out: Out, row: number, result: unknown): void {
-  (out.others ??= new Map()).set(row, result);
-}
-
-/** Runs until a row throws, and tells which: the try stands outside the loop, where it costs nothing. */
-function attempt(
-  rows: Loop,
-  compute: Compute,
-  columns: readonly Values[],
-  size: number,
-  odd: Uint8Array | undefined,
-  out: Out,
-  from: number,
-): { row: number; fault: Fault } | undefined {
-  const progress = { row: from };
-  try {
-    rows(compute, columns, size, odd, out, progress);
-    return undefined;
-  } catch (error) {
-    return { row: progress.row, fault: unexpected(error) };
-  }
+  return { numbers, others };
 }
 
 /** A bug stays in its own cell, and says so. */
@@ -58,74 +40,31 @@ export function unexpected(error: unknown): Fault {
   return new Fault("#N/A", `No result (${what}); please report this call.`);
 }
 
-type Loop = (
-  compute: Compute,
-  columns: readonly Values[],
-  size: number,
-  odd: Uint8Array | undefined,
-  out: Out,
-  progress: { row: number },
-) => void;
-
-const step = (values: Values) => (values.length === 1 ? 0 : 1);
-
-const loops: Record<number, Loop> = {
-  1: (compute, [a], size, odd, out, progress) => {
-    const p = step(a);
-    const { numbers } = out;
-    for (let i = progress.row; i < size; i++) {
-      progress.row = i;
-      if (odd !== undefined && odd[i] !== 0) continue;
-      const result = compute(a[i * p]);
-      if (typeof result === "number") numbers[i] = result;
-      else keep(out, i, result);
-    }
-  },
-  2: (compute, [a, b], size, odd, out, progress) => {
-    const [p, q] = [step(a), step(b)];
-    const { numbers } = out;
-    for (let i = progress.row; i < size; i++) {
-      progress.row = i;
-      if (odd !== undefined && odd[i] !== 0) continue;
-      const result = compute(a[i * p], b[i * q]);
-      if (typeof result === "number") numbers[i] = result;
-      else keep(out, i, result);
-    }
-  },
-  3: (compute, [a, b, c], size, odd, out, progress) => {
-    const [p, q, r] = [step(a), step(b), step(c)];
-    const { numbers } = out;
-    for (let i = progress.row; i < size; i++) {
-      progress.row = i;
-      if (odd !== undefined && odd[i] !== 0) continue;
-      const result = compute(a[i * p], b[i * q], c[i * r]);
-      if (typeof result === "number") numbers[i] = result;
-      else keep(out, i, result);
-    }
-  },
-  4: (compute, [a, b, c, d], size, odd, out, progress) => {
-    const [p, q, r, s] = [step(a), step(b), step(c), step(d)];
-    const { numbers } = out;
-    for (let i = progress.row; i < size; i++) {
-      progress.row = i;
-      if (odd !== undefined && odd[i] !== 0) continue;
-      const result = compute(a[i * p], b[i * q], c[i * r], d[i * s]);
-      if (typeof result === "number") numbers[i] = result;
-      else keep(out, i, result);
-    }
-  },
-};
-
-const anyNumber: Loop = (compute, columns, size, odd, out, progress) => {
-  const steps = columns.map(step);
-  const { numbers } = out;
-  const values = new Array(columns.length);
-  for (let i = progress.row; i < size; i++) {
-    progress.row = i;
-    if (odd !== undefined && odd[i] !== 0) continue;
-    for (let k = 0; k < columns.length; k++) values[k] = columns[k][i * steps[k]];
-    const result = compute(...values);
-    if (typeof result === "number") numbers[i] = result;
-    else keep(out, i, result);
+/**
+ * The call for one row. Arguments go by position, without an array in between: over long columns that spread costs more
+ * than the physics. A column of one value has step 0 and stays where it is.
+ */
+function caller(compute: Compute, columns: readonly Values[]): (row: number) => unknown {
+  const [a, b, c, d, e, f, g, h] = columns;
+  const [p, q, r, s, t, u, v, w] = columns.map((values) => (values.length === 1 ? 0 : 1));
+  switch (columns.length) {
+    case 1:
+      return (i) => compute(a[i * p]);
+    case 2:
+      return (i) => compute(a[i * p], b[i * q]);
+    case 3:
+      return (i) => compute(a[i * p], b[i * q], c[i * r]);
+    case 4:
+      return (i) => compute(a[i * p], b[i * q], c[i * r], d[i * s]);
+    case 5:
+      return (i) => compute(a[i * p], b[i * q], c[i * r], d[i * s], e[i * t]);
+    case 6:
+      return (i) => compute(a[i * p], b[i * q], c[i * r], d[i * s], e[i * t], f[i * u]);
+    case 7:
+      return (i) => compute(a[i * p], b[i * q], c[i * r], d[i * s], e[i * t], f[i * u], g[i * v]);
+    case 8:
+      return (i) => compute(a[i * p], b[i * q], c[i * r], d[i * s], e[i * t], f[i * u], g[i * v], h[i * w]);
+    default:
+      return (i) => compute(...columns.map((values) => values[values.length === 1 ? 0 : i]));
   }
-};
+}

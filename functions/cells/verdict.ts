@@ -52,6 +52,16 @@ export function worst(verdicts: readonly Verdict[]): Verdict | undefined {
   );
 }
 
+/** The worst verdict of an entry's limits at these inputs; undefined where none applies. */
+export function worstOf(entry: Entry<any>, values: readonly unknown[]): Verdict | undefined {
+  let found: Verdict | undefined;
+  for (const limit of entry.limits) {
+    const verdict = judge(limit, values);
+    if (verdict && (found === undefined || rank[verdict.word] > rank[found.word])) found = verdict;
+  }
+  return found;
+}
+
 /** A model that has no solution fails, with the reason its own message gives. */
 export function unsolved(fault: Fault): string {
   return `fails: ${fault.message}`;

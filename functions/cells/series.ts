@@ -1,0 +1,120 @@
+import { badInput, Fault } from "./fault";
+import { isCellError, passOn, type CellError } from "./host";
+import { blockInput, type Input } from "./inputs";
+import type { Quantity } from "./quantities";
+import { article, conversionTo, readQuantityText, type Conversion } from "./quantity-text";
+import { parseUnit } from "./units";
+
+/** A column as an instrument wrote it: numbers, and among them headings, words for "no reading", blanks, errors. */
+export interface Series {
+  /** The input's name, for messages. */
+  name: string;
+  /** One number per cell in the quantity's own unit; NaN where the cell has none. */
+  values: Float64Array;
+  /** Whether the cell is empty, or a 0 that may be an empty cell: the host sends both alike. */
+  blank: Uint8Array;
+  /** Cells whose text is no number, such as "OL"; the first row that is a heading is not counted. */
+  unread: number;
+  /** The first of those texts. */
+  word?: string;
+  /** The unit that a heading names, where it isn't the quantity's own. */
+  unit?: string;
+  /** Errors other than #N/A, which is how a sheet says "no reading". */
+  errors: Map<number, CellError>;
+}
+
+/** A whole column (or row) that is one argument. */
+export function seriesInput(name: string, quantity: Quantity): Input<Series> {
+  return { ...blockInput(name, (cells) => readSeries(name, quantity, cells), quantity), seesErrors: true };
+}
+
+function readSeries(name: string, quantity: Quantity, rows: unknown[][]): Series | Fault {
+  if (rows.length > 1 && rows[0].length > 1) {
+    return badInput(name, `${rows.length} rows by ${rows[0].length} columns are more than one series`, "select one column");
+  }
+  const cells = rows.length === 1 ? rows[0] : rows.map((row) => row[0]);
+  const { length } = cells;
+  const series: Series = {
+    name,
+    values: new Float64Array(length).fill(NaN),
+    blank: new Uint8Array(length),
+    unread: 0,
+    errors: new Map(),
+  };
+  const state = { series, quantity, heading: undefined as Conversion | undefined, begun: false };
+  for (let i = 0; i < length; i++) {
+    const fault = readCell(state, cells[i], i);
+    if (fault) return fault;
+  }
+  return series;
+}
+
+interface State {
+  series: Series;
+  quantity: Quantity;
+  /** Conversion of bare numbers from the unit in the last heading. */
+  heading: Conversion | undefined;
+  /** Whether a number has been met. */
+  begun: boolean;
+}
+
+function readCell(state: State, cell: unknown, i: number): Fault | undefined {
+  const { series } = state;
+  if (typeof cell === "number" && Number.isFinite(cell)) {
+    series.values[i] = own(cell, state.heading);
+    if (cell === 0) series.blank[i] = 1;
+    else state.begun = true;
+  } else if (cell === null || cell === undefined || (typeof cell === "string" && cell.trim() === "")) {
+    series.blank[i] = 1;
+  } else if (isCellError(cell)) {
+    readError(series, cell, i);
+  } else if (typeof cell === "string") {
+    return readText(state, cell.trim(), i);
+  } else {
+    return badInput(series.name, `row ${i + 1} holds neither a number nor text`, "leave such cells out of the range");
+  }
+  return undefined;
+}
+
+function readError(series: Series, cell: unknown, i: number): void {
+  const error = passOn(cell, series.name);
+  if (error.code !== "#N/A") series.errors.set(i, error);
+  series.unread++;
+  series.word ??= error.code;
+}
+
+function readText(state: State, text: string, i: number): Fault | undefined {
+  const { series, quantity } = state;
+  if (/^[+\-−]?[.,]?\d/.test(text)) {
+    const value = readQuantityText(series.name, quantity, text);
+    if (value instanceof Fault) return new Fault(value.code, `Row ${i + 1}, ${value.message}`);
+    series.values[i] = /[^\d.,eE+\-−\s]/.test(text) ? value : own(value, state.heading);
+    state.begun = true;
+    return undefined;
+  }
+  const unitText = unitInHeading(text);
+  const unit = unitText === undefined ? undefined : parseUnit(unitText);
+  if (unitText !== undefined && unit) {
+    const conversion = conversionTo(quantity, unitText);
+    if (!conversion) {
+      const wanted = `select a column of ${quantity.name}, or mend its heading`;
+      return badInput(series.name, `"${text}" heads a column that is not ${article(quantity.name)}`, wanted);
+    }
+    state.heading = conversion;
+    if (conversion.scale !== 1 || conversion.offset !== 0) series.unit = unitText;
+  }
+  if (state.begun || (unit === undefined && series.values.length === 1)) {
+    series.unread++;
+    series.word ??= text;
+  }
+  return undefined;
+}
+
+function own(value: number, heading: Conversion | undefined): number {
+  return heading ? value * heading.scale + heading.offset : value;
+}
+
+/** "I (mA)", "I [mA]", "I / mA", "I, mA": the text where a heading names its unit. */
+function unitInHeading(text: string): string | undefined {
+  return (/[([{]\s*(.+?)\s*[)\]}]\s*$/.exec(text) ?? /[/,]\s*([^/,]+)$/.exec(text))?.[1];
+}
