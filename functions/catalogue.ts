@@ -1,4 +1,5 @@
 import type { Entry, Family } from "./cells/entry";
+import { checksOver } from "./checks/entries";
 import { edge } from "./edge/entries";
 import { helpers } from "./helpers/entries";
 import { ionMix } from "./ion-mix/entries";
@@ -6,6 +7,9 @@ import { magnetised } from "./magnetised/entries";
 import { negativeIons } from "./negative-ions/entries";
 import { rf } from "./rf/entries";
 import { wall } from "./wall/entries";
+
+/** The checks find every function by its entry, those added later too. */
+export const checks = checksOver({ named: entryNamed, all: () => catalogue });
 
 /** All families in the catalogue's order: what the pane, the check functions and the tests iterate over. */
 export const families: readonly Family[] = [
@@ -15,6 +19,7 @@ export const families: readonly Family[] = [
   negativeIons,
   ionMix,
   magnetised,
+  checks.family,
   helpers,
 ];
 

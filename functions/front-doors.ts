@@ -1,3 +1,4 @@
+import * as checks from "./checks/functions";
 import * as edge from "./edge/functions";
 import * as helpers from "./helpers/functions";
 import * as ionMix from "./ion-mix/functions";
@@ -17,6 +18,7 @@ export const frontDoors: Readonly<Record<string, FrontDoor>> = Object.fromEntrie
   negativeIons,
   ionMix,
   magnetised,
+  checks,
   helpers,
 ]
     .flatMap((family) => Object.entries(family) as [string, unknown][])
