@@ -6,7 +6,6 @@ import { prettyUnit } from "../functions/cells/format";
 import { isCellError } from "../functions/cells/host";
 import { parseUnit } from "../functions/cells/units";
 import { frontDoors } from "../functions/front-doors";
-// @ts-expect-error -- a build script in plain JavaScript
 import { functionsJson } from "../manifest/build/functions-json.js";
 
 interface Parameter {
