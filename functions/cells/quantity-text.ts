@@ -141,9 +141,14 @@ const instrumentWords =
   /^(ol|o\.?l\.?|ovld|overload|over ?range|n\/?a|nan|inf|infinity|-+|err(or)?|\*+|\?+|none|null|open|sat)$/i;
 const dateText = /^(\d{1,4}[-/.]\d{1,2}[-/.]\d{1,4}|\d{1,2}:\d{2})/;
 
+/** Whether a text is what instruments write where they have no reading: "OL", "n/a", "---". */
+export function isInstrumentWord(text: string): boolean {
+  return instrumentWords.test(text.replace(/^[+-](?=\w)/, ""));
+}
+
 function notANumber(name: string, quantity: Quantity, typed: string): Fault {
   const expected = `type ${article(quantity.name)} such as ${quantity.example}`;
-  if (instrumentWords.test(typed)) {
+  if (isInstrumentWord(typed)) {
     return badInput(name, `"${typed}" is an instrument's word for no reading`, `leave the row blank or ${expected}`);
   }
   return badInput(name, `"${shorten(typed)}" is not ${article(quantity.name)}`, expected);

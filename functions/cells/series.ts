@@ -1,8 +1,9 @@
 import { badInput, Fault } from "./fault";
-import { isCellError, passOn, type CellError } from "./host";
+import { format } from "./format";
+import { isCellError, passOn } from "./host";
 import { blockInput, type Input } from "./inputs";
 import type { Quantity } from "./quantities";
-import { article, conversionTo, readQuantityText, type Conversion } from "./quantity-text";
+import { article, conversionTo, isInstrumentWord, readQuantityText, type Conversion } from "./quantity-text";
 import { parseUnit } from "./units";
 
 /** A column as an instrument wrote it: numbers, and among them headings, words for "no reading", blanks, errors. */
@@ -13,14 +14,14 @@ export interface Series {
   values: Float64Array;
   /** Whether the cell is empty, or a 0 that may be an empty cell: the host sends both alike. */
   blank: Uint8Array;
-  /** Cells whose text is no number, such as "OL"; the first row that is a heading is not counted. */
+  /** Cells that hold no number, such as "OL"; blanks and headings are not counted. */
   unread: number;
-  /** The first of those texts. */
+  /** What the first of them says. */
   word?: string;
   /** The unit that a heading names, where it isn't the quantity's own. */
   unit?: string;
-  /** Errors other than #N/A, which is how a sheet says "no reading". */
-  errors: Map<number, CellError>;
+  /** Cells that hold an error other than #N/A, which is how a sheet says "no reading". */
+  errors: Set<number>;
 }
 
 /** A whole column (or row) that is one argument. */
@@ -30,7 +31,11 @@ export function seriesInput(name: string, quantity: Quantity): Input<Series> {
 
 function readSeries(name: string, quantity: Quantity, rows: unknown[][]): Series | Fault {
   if (rows.length > 1 && rows[0].length > 1) {
-    return badInput(name, `${rows.length} rows by ${rows[0].length} columns are more than one series`, "select one column");
+    return badInput(
+      name,
+      `${rows.length} rows by ${rows[0].length} columns are more than one series`,
+      "select one column",
+    );
   }
   const cells = rows.length === 1 ? rows[0] : rows.map((row) => row[0]);
   const { length } = cells;
@@ -39,7 +44,7 @@ function readSeries(name: string, quantity: Quantity, rows: unknown[][]): Series
     values: new Float64Array(length).fill(NaN),
     blank: new Uint8Array(length),
     unread: 0,
-    errors: new Map(),
+    errors: new Set(),
   };
   const state = { series, quantity, heading: undefined as Conversion | undefined, begun: false };
   for (let i = 0; i < length; i++) {
@@ -58,12 +63,17 @@ interface State {
   begun: boolean;
 }
 
+/** Instruments write 9.91e37 for "not a number" and 9.9e37 for "infinite": SCPI-1999, 7.2.1. */
+const noReading = 9.9e37;
+
 function readCell(state: State, cell: unknown, i: number): Fault | undefined {
   const { series } = state;
-  if (typeof cell === "number" && Number.isFinite(cell)) {
+  if (typeof cell === "number" && Math.abs(cell) < noReading) {
     series.values[i] = own(cell, state.heading);
     if (cell === 0) series.blank[i] = 1;
     else state.begun = true;
+  } else if (typeof cell === "number") {
+    countUnread(series, format(cell));
   } else if (cell === null || cell === undefined || (typeof cell === "string" && cell.trim() === "")) {
     series.blank[i] = 1;
   } else if (isCellError(cell)) {
@@ -77,10 +87,9 @@ function readCell(state: State, cell: unknown, i: number): Fault | undefined {
 }
 
 function readError(series: Series, cell: unknown, i: number): void {
-  const error = passOn(cell, series.name);
-  if (error.code !== "#N/A") series.errors.set(i, error);
-  series.unread++;
-  series.word ??= error.code;
+  const { code } = passOn(cell, series.name);
+  if (code !== "#N/A") series.errors.add(i);
+  countUnread(series, code);
 }
 
 function readText(state: State, text: string, i: number): Fault | undefined {
@@ -92,22 +101,32 @@ function readText(state: State, text: string, i: number): Fault | undefined {
     state.begun = true;
     return undefined;
   }
-  const unitText = unitInHeading(text);
-  const unit = unitText === undefined ? undefined : parseUnit(unitText);
-  if (unitText !== undefined && unit) {
-    const conversion = conversionTo(quantity, unitText);
-    if (!conversion) {
-      const wanted = `select a column of ${quantity.name}, or mend its heading`;
-      return badInput(series.name, `"${text}" heads a column that is not ${article(quantity.name)}`, wanted);
-    }
-    state.heading = conversion;
-    if (conversion.scale !== 1 || conversion.offset !== 0) series.unit = unitText;
-  }
-  if (state.begun || (unit === undefined && series.values.length === 1)) {
-    series.unread++;
-    series.word ??= text;
-  }
+  if (isInstrumentWord(text)) countUnread(series, text);
+  else return readHeading(state, text);
   return undefined;
+}
+
+/** Text above the numbers is a heading, and so is a later one that names a unit; other text between numbers is no reading. */
+function readHeading(state: State, text: string): Fault | undefined {
+  const { series, quantity } = state;
+  const unitText = unitInHeading(text);
+  if (unitText === undefined || !parseUnit(unitText)) {
+    if (state.begun) countUnread(series, text);
+    return undefined;
+  }
+  const conversion = conversionTo(quantity, unitText);
+  if (!conversion) {
+    const wanted = `select a column of ${quantity.name}, or mend its heading`;
+    return badInput(series.name, `"${text}" heads a column that is not ${article(quantity.name)}`, wanted);
+  }
+  state.heading = conversion;
+  if (conversion.scale !== 1 || conversion.offset !== 0) series.unit = unitText;
+  return undefined;
+}
+
+function countUnread(series: Series, text: string): void {
+  series.unread++;
+  series.word ??= text;
 }
 
 function own(value: number, heading: Conversion | undefined): number {
