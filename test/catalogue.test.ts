@@ -1,4 +1,3 @@
-import { existsSync, readdirSync } from "node:fs";
 import { describe, expect, test } from "vitest";
 import { catalogue, entryNamed } from "../functions/catalogue";
 import { isTable } from "../functions/cells/entry";
@@ -6,32 +5,13 @@ import { prettyUnit } from "../functions/cells/format";
 import { isCellError } from "../functions/cells/host";
 import { parseUnit } from "../functions/cells/units";
 import { frontDoors } from "../functions/front-doors";
-import { functionsJson } from "../manifest/build/functions-json.js";
+import { metadata, type Declaration } from "./declarations";
 
-interface Parameter {
-  name: string;
-  description: string;
-  optional?: boolean;
-  repeating?: boolean;
-  dimensionality?: string;
-  customEnumId?: string;
-}
-interface Declared {
-  id: string;
-  description: string;
-  helpUrl: string;
-  parameters: Parameter[];
-}
-
-const files = readdirSync("functions")
-  .map((family) => `functions/${family}/functions.ts`)
-  .filter((file) => existsSync(file));
-const metadata: { functions: Declared[]; enums: { id: string; values: { stringValue: string }[] }[] } =
-  await functionsJson(files, "https://localhost:3000");
-const declared = new Map(metadata.functions.map((each) => [each.id, each]));
+const { functions, enums } = await metadata();
+const declared = new Map(functions.map((each) => [each.id, each]));
 
 /** So that an entry without a front door fails its own tests instead of all. */
-const undeclared: Declared = { id: "", description: "", helpUrl: "", parameters: [] };
+const undeclared: Declaration = { id: "", description: "", helpUrl: "", parameters: [] };
 
 test("every entry has a front door and a declaration, and there are no others", () => {
   const names = catalogue.map(({ name }) => name).sort();
@@ -65,7 +45,7 @@ describe.each(catalogue.map((entry) => [entry.name, entry] as const))("%s", (nam
   test("closed lists of words are the same in the formula bar's completion and in the entry", () => {
     parameters.forEach(({ customEnumId }, i) => {
       if (!customEnumId) return;
-      const words = metadata.enums.find(({ id }) => id === customEnumId)!.values.map((each) => each.stringValue);
+      const words = enums.find(({ id }) => id === customEnumId)!.values.map((each) => each.stringValue);
       expect(words).toEqual([...entry.inputs[i].words!]);
     });
   });

@@ -89,7 +89,7 @@ export function RFSHEATHWIDTH(V_dc: any[][], n_edge: any[][], T_e: any[][], unit
  * @param T_e Electron temperature, eV.
  * @param ion Ion as a formula or a mass in u.
  * @param [edge_ratio] Density at the sheath edge over that of the body, 0 to 1; exp(-1/2) unless given.
- * @param [unit] Unit of the result, ohm m² unless given.
+ * @param [unit] Unit of the result, Ω m² unless given.
  */
 export function SHEATHRESISTANCE(
   n_bulk: any[][],

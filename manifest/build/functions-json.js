@@ -14,6 +14,9 @@ export async function functionsJson(files, origin) {
   const twice = ids.filter((id, i) => ids.indexOf(id) !== i);
   if (twice.length > 0) throw new Error(`functions.json: declared twice: ${twice.join(", ")}`);
   for (const declared of metadata.functions) {
+    // The formula bar shows one line; the source breaks its lines where the page ends.
+    declared.description = declared.description.replace(/\s+/g, " ");
+    for (const parameter of declared.parameters) parameter.description = parameter.description.replace(/\s+/g, " ");
     if (declared.helpUrl) declared.helpUrl = declared.helpUrl.replace("https://localhost:3000", origin);
   }
   return { ...metadata, allowErrorForDataTypeAny: true };
