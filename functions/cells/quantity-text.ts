@@ -12,11 +12,10 @@ export interface Conversion {
 /** A number with a unit behind it, in the spellings people type: "1e11 cm^-3", "10¹⁷ m⁻³", "3,5 eV", "1×10^17 /m3". */
 export function readQuantityText(name: string, quantity: Quantity, text: string): number | Fault {
   const typed = text.trim();
-  const parts = plainNumber.exec(typeset.test(typed) ? withAsciiPowers(typed) : typed);
-  if (!parts || parts[1] === "") return notANumber(name, quantity, typed);
-  const [, digits, exponent, unitText] = parts;
-  const decimal = decimalPoint(digits);
-  if (decimal === undefined) {
+  const parts = numberAndUnit(typed);
+  if (!parts) return notANumber(name, quantity, typed);
+  const { value, unitText } = parts;
+  if (Number.isNaN(value)) {
     if (dateText.test(typed)) return wrongUnit(name, quantity, typed, typed);
     return badInput(
       name,
@@ -24,10 +23,19 @@ export function readQuantityText(name: string, quantity: Quantity, text: string)
       `write the decimal point as a dot, such as ${quantity.example}`,
     );
   }
-  const value = Number(exponent ? `${decimal}e${exponent}` : decimal);
   if (unitText === "") return value;
   const conversion = conversionTo(quantity, unitText);
   return conversion ? value * conversion.scale + conversion.offset : wrongUnit(name, quantity, typed, unitText);
+}
+
+/** The number in front of a unit, NaN where its comma could be read two ways; undefined where the text begins with none. */
+export function numberAndUnit(text: string): { value: number; unitText: string } | undefined {
+  const typed = text.trim();
+  const parts = plainNumber.exec(typeset.test(typed) ? withAsciiPowers(typed) : typed);
+  if (!parts || parts[1] === "") return undefined;
+  const [, digits, exponent, unitText] = parts;
+  const decimal = decimalPoint(digits);
+  return { value: decimal === undefined ? NaN : Number(exponent ? `${decimal}e${exponent}` : decimal), unitText };
 }
 
 const plainNumber = /^([+-]?(?:\d[\d.,]*|[.,]\d+))(?:[eE]([+-]?\d+))?\s*(.*)$/;
