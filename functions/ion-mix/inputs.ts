@@ -40,7 +40,7 @@ export function readMix(
   if (ions.length !== fractions.length) {
     return badInput(
       "fractions",
-      `${fractions.length} cells beside ${ions.length} ions`,
+      `${fractions.length} for ${ions.length} ions`,
       "select ranges of the same size, one fraction for each ion",
     );
   }
