@@ -1,0 +1,5 @@
+import type { OpeningSheet } from "./opening-sheet";
+import { preClean } from "./pre-clean";
+
+/** The sheets of the trial workbook, in the order of their tabs. */
+export const openingSheets: readonly OpeningSheet[] = [preClean];

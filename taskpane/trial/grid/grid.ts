@@ -1,0 +1,116 @@
+import { LocaleType, mergeLocales, ThemeService, Univer, UniverInstanceType, type IWorkbookData } from "@univerjs/core";
+import { FUniver } from "@univerjs/core/lib/facade";
+import {
+  CalculationMode,
+  CELL_INVERTED_INDEX_CACHE,
+  CellAlertManagerService,
+  FormulaDataModel,
+  ILayoutService,
+  SetFormulaCalculationStartMutation,
+  SheetsSelectionsService,
+  UniverSheetsCorePreset,
+  type FWorkbook,
+  type FWorksheet,
+} from "@univerjs/preset-sheets-core";
+import english from "@univerjs/preset-sheets-core/locales/en-US";
+import type { Cell } from "../../workbook/address";
+import type { Functions } from "../host";
+import { Contents } from "./contents";
+import { showOwnMessages } from "./error-popup";
+import { Messages } from "./messages";
+import { parameterHelp } from "./parameter-help";
+import { gridFunction, namespace } from "./sheath-function";
+import { applyAccent } from "./theme";
+
+export interface Grid {
+  api: FUniver;
+  workbook: FWorkbook;
+  contents: Contents;
+  /** Calls back after every change of the selected cell or of the sheet shown. */
+  onSelection(listener: () => void): () => void;
+  /** Calls back after every calculation. */
+  onCalculated(listener: () => void): void;
+  /** Resolves when what was written so far is calculated. */
+  calculated(): Promise<void>;
+  focus(): void;
+  setDark(dark: boolean): void;
+}
+
+/** A spreadsheet grid with its formula bar in `container`, knowing every bound function; nothing else of its kind. */
+export function createGrid(container: HTMLElement, functions: Functions, data: IWorkbookData, darkMode: boolean): Grid {
+  switchOffInvertedIndex();
+  const messages = new Messages();
+  const univer = new Univer({
+    locale: LocaleType.EN_US,
+    locales: { [LocaleType.EN_US]: mergeLocales(english) },
+    darkMode,
+  });
+  const injector = univer.__getInjector();
+  applyAccent(injector.get(ThemeService));
+  for (const plugin of pluginsFor(container, functions, messages)) {
+    if (Array.isArray(plugin)) univer.registerPlugin(plugin[0], plugin[1]);
+    else univer.registerPlugin(plugin);
+  }
+  univer.createUnit(UniverInstanceType.UNIVER_SHEET, data);
+
+  const api = FUniver.newAPI(univer);
+  const workbook = api.getActiveWorkbook()!;
+  const contents = new Contents(workbook, injector.get(FormulaDataModel), messages);
+  showOwnMessages(injector.get(CellAlertManagerService), workbook, contents);
+  api.onBeforeCommandExecute(({ id }) => {
+    if (id === SetFormulaCalculationStartMutation.id) messages.startRun();
+  });
+
+  const selections = injector.get(SheetsSelectionsService);
+  return {
+    api,
+    workbook,
+    contents,
+    onSelection(listener) {
+      const watched = [
+        selections.selectionMoveEnd$.subscribe(() => listener()),
+        selections.selectionSet$.subscribe(() => listener()),
+      ];
+      const switched = api.addEvent(api.Event.ActiveSheetChanged, () => listener());
+      return () => {
+        watched.forEach((each) => each.unsubscribe());
+        switched.dispose();
+      };
+    },
+    onCalculated: (listener) => void api.getFormula().calculationResultApplied(() => listener()),
+    calculated: () => api.getFormula().onCalculationResultApplied(),
+    focus: () => injector.get(ILayoutService).focus(),
+    setDark: (dark) => api.toggleDarkMode(dark),
+  };
+}
+
+/** The one cell that typing goes to, and its sheet. */
+export function selectedCell({ workbook }: Grid): { sheet: FWorksheet; cell: Cell } {
+  const sheet = workbook.getActiveSheet();
+  const range = sheet.getSelection()?.getCurrentCell();
+  return { sheet, cell: { row: range?.actualRow ?? 0, column: range?.actualColumn ?? 0 } };
+}
+
+function pluginsFor(container: HTMLElement, functions: Functions, messages: Messages) {
+  const declared = functions.functions.filter(({ id }) => functions.bound[id]);
+  const gridName = (name: string) => `${namespace}.${name}`;
+  return UniverSheetsCorePreset({
+    container,
+    header: true,
+    toolbar: false,
+    footer: false,
+    formulaBar: true,
+    contextMenu: false,
+    formula: {
+      function: declared.map((each) => [gridFunction(each, functions.bound[each.id], messages), gridName(each.name)]),
+      description: declared.map((each) => parameterHelp(each, gridName(each.name), functions.enums ?? [])),
+      initialFormulaComputing: CalculationMode.FORCED,
+    },
+  }).plugins;
+}
+
+/** The grid's look-up index makes spilling quadratic in the rows; without it a search scans, which is quick enough. */
+function switchOffInvertedIndex(): void {
+  CELL_INVERTED_INDEX_CACHE.set = () => {};
+  CELL_INVERTED_INDEX_CACHE.setContinueBuildingCache = () => {};
+}
