@@ -57,7 +57,7 @@ export const NEGATIVEIONEDGE = entry("NEGATIVEIONEDGE", {
   limits: [oneEdge((alpha_b, gamma) => [alpha_b, gamma])],
   sources: [BT59, LL],
   changes: first,
-  example: [1.2, 15],
+  example: [2, 15],
   accuracy: "1e-10, and fewer digits close to a fold, where the rounding of alpha_b itself moves two roots that meet",
 });
 
