@@ -83,7 +83,7 @@ export default (env = {}) => {
   ].filter(({ entry }) => Object.values(entry).every((file) => existsSync(file)));
 
   /** Pages are written by hand and copied as they stand. */
-  const page = (from, transform) => ({ from: at(from), to: "[name][ext]", transform, noErrorOnMissing: true });
+  const page = (from, transform) => ({ from: at(from), to: "[name][ext]", transform });
   const hostPage = hosted ? (html) => fromVendor(html.toString()) : undefined;
   const site = {
     ...common(origin),
