@@ -272,7 +272,7 @@ export const RICHARDSONCURRENT = entry("RICHARDSONCURRENT", {
   sources: [D23],
   changes: first,
   example: [2500, 4.5],
-  accuracy: `${closedForm}, and one more for each unit of W/(k_B T)`,
+  accuracy: `${closedForm}, and two more for each unit of W/(k_B T)`,
 });
 
 export const EROSIONRATE = entry("EROSIONRATE", {

@@ -1,6 +1,7 @@
 import { NotTested, type Limit } from "../cells/entry";
 import type { Fault } from "../cells/fault";
 import { coldIons } from "../edge/limits";
+import { grazingLimit } from "../magnetised/model";
 import { m_e } from "../matter/constants";
 import type { Ion } from "../matter/ion";
 import { CP, HW67, LL, S12 } from "../sources";
@@ -86,7 +87,7 @@ function electronsMatter({ V_w, T_e, ion, T_i }: Omit<AtWall, "delta_e">): boole
   return typeof V_w === "number" && electronExcess(T_e, ion, T_i ?? 0) * Math.exp(Math.min(0, V_w / T_e)) > 0.01;
 }
 
-/** In a strong field at an angle, the Debye sheath lives only above the grazing limit asin(4u_B/v̄_e). */
+/** In a strong field at an angle, the Debye sheath lives only above the grazing limit. */
 export function aboveGrazing(
   of: (...values: any[]) => { angle: number | undefined; T_e: number; ion: Ion; T_i: number | undefined },
 ): Limit {
@@ -96,7 +97,7 @@ export function aboveGrazing(
     value: (...values) => {
       const { angle, T_e, ion, T_i } = of(...values);
       if (angle === undefined) return undefined;
-      return (angle * Math.PI) / 180 / Math.asin(Math.min(1, 1 / electronExcess(T_e, ion, T_i ?? 0)));
+      return angle / grazingLimit(ion, (T_i ?? 0) / T_e);
     },
     holds: 2,
     fails: 1,

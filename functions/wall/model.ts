@@ -81,8 +81,10 @@ export const richardsonConstant = ((4 * Math.PI * m_e * e * k_B) / h) * (k_B / h
 
 /** Thermionic current density A T² exp(−eW/(k_B T)) in A/m²; T in K, W in eV. Dushman, Phys. Rev. 21 (1923) 623. */
 export function richardsonCurrent(T_wall: number, work_function: number, A_R: number): number {
-  return A_R * T_wall * T_wall * Math.exp((-work_function * e) / (k_B * T_wall));
+  return A_R * T_wall * T_wall * Math.exp(-(work_function / T_wall) * kelvinPerElectronvolt);
 }
+
+const kelvinPerElectronvolt = e / k_B;
 
 /** Speed Γ Y m/ρ in m/s at which a surface recedes; m in kg the mass of a formula unit, Y in such units per ion. */
 export function erosionRate(flux: number, sputter_yield: number, mass: number, density: number): number {
