@@ -9,11 +9,27 @@ export const equations: Record<string, string> = Object.fromEntries(
   catalogue.map(({ name, equation }) => [name, typeset(equation)]),
 );
 
-/** One <math> for each equation of the line, so that a narrow pane can put them below each other. */
+/** One <math> a line, each narrow enough for the pane. */
 function typeset(tex: string): string {
-  return tex
-    .split(/,?\s*\\qquad\s*/)
-    .map((part) => temml.renderToString(part, { displayMode: true, throwOnError: true }))
+  return lines(tex)
+    .map((line) => [line, temml.renderToString(line, { displayMode: true, throwOnError: true })])
+    .map(([line, mathml]) => (line.startsWith("=") ? mathml.replace('class="', 'class="continued ') : mathml))
     .map((mathml) => mathml.replace(/ style="[^"]*"/g, ""))
     .join("");
+}
+
+/** Breaks where print would: at wide spaces, and before the second and each further "=" of a chain. */
+function lines(tex: string): string[] {
+  const found = [""];
+  let depth = 0;
+  let equals = 0;
+  for (const [token] of tex.matchAll(/\\(?:[A-Za-z]+|.)|[^\\]/gs)) {
+    if (/^(\{|\\left|\\begin)$/.test(token)) depth++;
+    if (/^(\}|\\right|\\end)$/.test(token)) depth--;
+    const space = depth === 0 && /^\\q?quad$/.test(token);
+    if (space) equals = 0;
+    if (space || (depth === 0 && token === "=" && ++equals > 1)) found.push("");
+    if (!space) found[found.length - 1] += token;
+  }
+  return found.map((line) => line.trim().replace(/,$/, "")).filter((line) => line !== "");
 }

@@ -1,5 +1,6 @@
 import { equations } from "../equations";
 import { h } from "./h";
+import { labels } from "./labels";
 
 /** The equation as the build typeset it; undefined where the catalogue has none. */
 export function equationView(name: string): HTMLElement | undefined {
@@ -9,7 +10,7 @@ export function equationView(name: string): HTMLElement | undefined {
   // Wide equations scroll inside their own box, which the keyboard must be able to reach.
   return h(
     "div",
-    { class: "equation", tabindex: 0, role: "group", "aria-label": `Equation of ${name}` },
+    { class: "equation", tabindex: 0, role: "group", "aria-label": `${labels.equationOf} ${name}` },
     ...parsed.body.children,
   );
 }

@@ -1,4 +1,5 @@
 import { prettyUnit } from "../../functions/cells/format";
+import type { Input } from "../../functions/cells/inputs";
 import type { Quantity } from "../../functions/cells/quantities";
 import type { Field } from "./fields";
 import { h, setAttribute } from "./h";
@@ -14,11 +15,21 @@ export interface FieldView {
   mark(doubt: string | undefined, refused: boolean): void;
 }
 
+/** Where the result and its message stand: a refused field is described by it. */
+export const outcomeId = "wallfall-outcome";
+
 type Control = FieldView["control"];
 
-export function fieldView({ name, meaning, input }: Field & { input: object }, text: string): FieldView {
+/** How more than one cell is typed into a field. */
+const typing: Record<Field["takes"], string> = {
+  cell: "",
+  range: "a range: commas between cells, a line for each row",
+  arguments: "a line for each argument",
+};
+
+export function fieldView({ name, meaning, takes, input }: Field & { input: Input }, text: string): FieldView {
   const id = `wallfall-input-${name}`;
-  const facts = inputFacts(input);
+  const facts = [inputFacts(input), typing[takes]].filter((fact) => fact !== "").join("; ");
   const unit = unitOf(input);
   const doubtNote = h("p", { class: "doubt", id: `${id}-doubt`, hidden: true });
   const control = controlFor(input, id, text);
@@ -34,42 +45,46 @@ export function fieldView({ name, meaning, input }: Field & { input: object }, t
         h("span", { class: "symbol" }, name),
         input.optional && h("span", { class: "optional" }, ` ${labels.optional}`),
       ),
-      h("p", { class: "meaning", id: `${id}-meaning` }, meaning, facts && h("span", { class: "facts" }, ` ${facts}.`)),
+      h("p", { class: "meaning", id: `${id}-meaning` }, meaning),
     ),
-    h("div", { class: "entry" }, control, unit && h("span", { class: "unit" }, unit)),
+    h(
+      "div",
+      { class: "entry" },
+      control,
+      unit !== "" && h("span", { class: "unit", id: `${id}-unit` }, unit),
+      facts !== "" && h("p", { class: "facts", id: `${id}-facts` }, facts),
+    ),
     doubtNote,
   );
-  const describe = (...ids: string[]) => control.setAttribute("aria-describedby", ids.join(" "));
-  describe(`${id}-meaning`);
+  const standing = [unit !== "" && `${id}-unit`, `${id}-meaning`, facts !== "" && `${id}-facts`];
+  const describe = (...more: (string | false)[]) =>
+    control.setAttribute("aria-describedby", [...standing, ...more].filter((each) => each !== false).join(" "));
+  describe();
   const mark = (doubt: string | undefined, refused: boolean) => {
     doubtNote.hidden = doubt === undefined;
     doubtNote.textContent = doubt === undefined ? "" : `${labels.doubtfulInput}: ${doubt}`;
     setAttribute(control, "aria-invalid", refused && "true");
-    describe(
-      `${id}-meaning`,
-      ...(doubt === undefined ? [] : [`${id}-doubt`]),
-      ...(refused ? ["wallfall-outcome"] : []),
-    );
+    describe(doubt !== undefined && `${id}-doubt`, refused && outcomeId);
   };
   return { element, control, mark };
 }
 
-function controlFor(input: NonNullable<Field["input"]>, id: string, text: string): Control {
+function controlFor(input: Input, id: string, text: string): Control {
   if (input.kind === "words") return choice(id, input.words ?? [], input.optional, text);
   if (input.kind === "flag") return choice(id, ["TRUE", "FALSE"], input.optional, text);
-  const typing = { id, spellcheck: "false", autocomplete: "off", autocapitalize: "off" };
+  const plain = { id, spellcheck: "false", autocomplete: "off", autocapitalize: "off" };
   if (input.kind === "block") {
-    const area = h("textarea", { ...typing, rows: 3 });
+    const area = h("textarea", { ...plain, rows: Math.min(8, text.split("\n").length) });
     area.value = text;
     return area;
   }
-  const field = h("input", { ...typing, type: "text" });
+  const field = h("input", { ...plain, type: "text" });
   field.value = text;
   return field;
 }
 
 function choice(id: string, words: readonly string[], optional: boolean, text: string): HTMLSelectElement {
-  const blank = optional || text === "" ? [h("option", { value: "" }, "(blank)")] : [];
+  const blank = optional || text === "" ? [h("option", { value: "" }, `(${labels.blank})`)] : [];
   const select = h("select", { id }, ...blank, ...words.map((word) => h("option", { value: word }, word)));
   select.value = words.find((word) => word.toLowerCase() === text.toLowerCase()) ?? "";
   return select;

@@ -1,10 +1,17 @@
 import { readTyped, readTypedBlock, type Typed } from "./typed";
 
-/** One field's text, and whether it stands for a whole range. */
+/** One field's text, and what it stands for: a cell, a range, or any number of further arguments. */
 export interface FieldText {
   name: string;
   text: string;
-  block: boolean;
+  takes: "cell" | "range" | "arguments";
+}
+
+/** The arguments in a field, each as rows of cells; blank at the end, they are left out. */
+export function typedArguments({ text, takes }: FieldText): Typed[][][] {
+  if (takes === "cell") return [[[readTyped(text)]]];
+  if (takes === "range") return [readTypedBlock(text)];
+  return text.trimEnd().split(/\r?\n/).map(readTypedBlock);
 }
 
 /** What a cell takes; text inside a formula has a limit of its own. */
@@ -16,9 +23,7 @@ const longestText = 255;
  * programming interface takes in every language.
  */
 export function formulaText(name: string, fields: readonly FieldText[]): string {
-  const literals = fields.map(({ text, block }) =>
-    block ? blockLiteral(readTypedBlock(text)) : readTyped(text).literal,
-  );
+  const literals = fields.flatMap(typedArguments).map(literalOf);
   while (literals.length > 0 && literals.at(-1) === "") literals.pop();
   return `=SHEATH.${name}(${literals.join(",")})`;
 }
@@ -28,16 +33,13 @@ export function formulaProblem(formula: string, fields: readonly FieldText[]): s
   if (formula.length > longestFormula) {
     return `The formula has ${formula.length} characters and a cell takes ${longestFormula}: put the values in cells and give their range instead.`;
   }
-  const ragged = fields.find(({ text, block }) => block && isRagged(readTypedBlock(text)));
+  const ragged = fields.find((field) => typedArguments(field).some(isRagged));
   if (ragged) return `${ragged.name}: the lines have different numbers of values; give each line as many.`;
-  const long = fields.find(({ text, block }) => {
-    const typed = block ? readTypedBlock(text).flat() : [readTyped(text)];
-    return typed.some(({ cell }) => typeof cell === "string" && cell.length > longestText);
-  });
+  const long = fields.find((field) => typedArguments(field).flat(2).some(isLongText));
   return long && `${long.name}: text inside a formula has at most ${longestText} characters; put it in a cell instead.`;
 }
 
-function blockLiteral(rows: readonly Typed[][]): string {
+function literalOf(rows: readonly Typed[][]): string {
   if (rows.length === 0) return "";
   if (rows.length === 1 && rows[0].length === 1) return rows[0][0].literal;
   return `{${rows.map((row) => row.map(constant).join(",")).join(";")}}`;
@@ -51,4 +53,8 @@ function constant({ cell, literal }: Typed): string {
 
 function isRagged(rows: readonly Typed[][]): boolean {
   return rows.some((row) => row.length !== rows[0].length);
+}
+
+function isLongText({ cell }: Typed): boolean {
+  return typeof cell === "string" && cell.length > longestText;
 }

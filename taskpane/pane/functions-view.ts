@@ -1,7 +1,8 @@
 import { entryNamed } from "../../functions/catalogue";
 import type { Workbook } from "../workbook/workbook";
 import { functionList } from "./function-list";
-import { functionPage, type Drafts } from "./function-page";
+import type { Drafts } from "./calculation";
+import { functionPage } from "./function-page";
 import { h } from "./h";
 import { labels } from "./labels";
 import type { View } from "./view";

@@ -7,23 +7,24 @@ export function head(): HTMLElement {
 }
 
 const width = 1200;
-const height = 72;
+const height = 76;
 const top = 10;
-const bottom = 66;
-const layer = 150;
+const bottom = 70;
+const layer = 104;
+const wallAt = width - 9;
 
-/** Flat in the plasma, then Child's law φ ∝ −(1 − x/s)^(4/3) through the layer; drawn to its right edge, where the wall is. */
+/** Flat in the plasma, then Child's law φ ∝ −(1 − x/s)^(4/3) through the layer to the wall, which is hatched as in a drawing. */
 function fall(): SVGElement {
-  const points: string[] = [];
-  for (let step = 0; step <= 60; step++) {
-    const depth = step / 60;
-    const x = width - 6 - layer * (1 - depth);
-    points.push(`${x.toFixed(1)} ${(top + (bottom - top) * depth ** (4 / 3)).toFixed(2)}`);
-  }
+  const points = Array.from({ length: 41 }, (_, step) => {
+    const depth = step / 40;
+    return `${(wallAt - layer * (1 - depth)).toFixed(1)} ${(top + (bottom - top) * depth ** (4 / 3)).toFixed(2)}`;
+  });
+  const hatching = Array.from({ length: 11 }, (_, i) => `M${wallAt} ${i * 8}L${width} ${i * 8 - 9}`);
   return svg(
     "svg",
-    { class: "fall", viewBox: `0 0 ${width} ${height}`, preserveAspectRatio: "xMaxYMid slice", "aria-hidden": "true" },
+    { class: "fall", viewBox: `0 0 ${width} ${height}`, preserveAspectRatio: "xMaxYMin slice", "aria-hidden": "true" },
+    svg("path", { class: "hatching", d: hatching.join("") }),
+    svg("path", { class: "wall", d: `M${wallAt} 0V${height}` }),
     svg("path", { class: "potential", d: `M0 ${top}L${points.join("L")}` }),
-    svg("path", { class: "wall", d: `M${width - 3} 0V${height}` }),
   );
 }

@@ -1,5 +1,6 @@
 import { format, prettyUnit } from "../../functions/cells/format";
 import type { Input } from "../../functions/cells/inputs";
+import { labels } from "./labels";
 
 /** What an entry knows of an input that its description does not say: "above 0", "0 to 1; blank: 0.607". */
 export function inputFacts(input: Input): string {
@@ -23,9 +24,9 @@ function blankOf({ optional, blank, quantity }: Input): string | undefined {
   if (!optional || blank === undefined) return undefined;
   if (typeof blank === "number") {
     const unit = Number.isFinite(blank) && quantity?.unit ? ` ${prettyUnit(quantity.unit)}` : "";
-    return `blank: ${format(blank)}${unit}`;
+    return `${labels.blank}: ${format(blank)}${unit}`;
   }
-  if (typeof blank === "string") return `blank: ${blank}`;
-  if (typeof blank === "boolean") return `blank: ${blank ? "TRUE" : "FALSE"}`;
+  if (typeof blank === "string") return `${labels.blank}: ${blank}`;
+  if (typeof blank === "boolean") return `${labels.blank}: ${blank ? "TRUE" : "FALSE"}`;
   return undefined;
 }

@@ -1,14 +1,13 @@
 import type { Limit } from "../../functions/cells/entry";
-import { format } from "../../functions/cells/format";
 import type { Word } from "../../functions/cells/verdict";
 import { h, svg } from "./h";
 import { labels } from "./labels";
+import { numberText } from "./number-text";
 import type { Standing } from "./standing";
 
 /** The limits with what each says at the inputs of the moment. */
 export function limitsView(standings: readonly Standing[]): HTMLElement {
-  if (standings.length === 0)
-    return h("p", {}, "None: this is a definition or a conversion, good wherever it has a value.");
+  if (standings.length === 0) return h("p", {}, "None that its inputs could test.");
   return h("ul", { class: "limits" }, ...standings.map(limitView));
 }
 
@@ -19,7 +18,7 @@ function limitView({ limit, verdict }: Standing): HTMLElement {
   }
   const { word, value, needs } = verdict;
   const text = word === "not tested" ? `${labels.notTested}: give ${needs}` : word;
-  const measured = value === undefined ? bounds(limit) : `is ${format(value)}; ${bounds(limit)}`;
+  const measured = value === undefined ? bounds(limit) : `is ${numberText(value, 3)}; ${bounds(limit)}`;
   return item(word, text, limit, measured, word === "fails" || word === "marginal" ? limit.reason : undefined);
 }
 
@@ -41,11 +40,12 @@ function item(word: Word, text: string, limit: Limit, measured: string, reason?:
 }
 
 /** "holds up to 0.1, fails above 0.5": the bounds in the order in which the measure meets them. */
-function bounds({ holds, fails }: Limit): string {
-  if (holds === fails) return `holds at ${format(holds)} or ${holds >= 0 ? "more" : "less"}, else fails`;
-  return holds > fails
-    ? `holds from ${format(holds)} up, fails below ${format(fails)}`
-    : `holds up to ${format(holds)}, fails above ${format(fails)}`;
+function bounds(limit: Limit): string {
+  const [holds, fails] = [numberText(limit.holds, 3), numberText(limit.fails, 3)];
+  if (limit.holds === limit.fails) return `holds from ${holds} up, else fails`;
+  return limit.holds > limit.fails
+    ? `holds from ${holds} up, fails below ${fails}`
+    : `holds up to ${holds}, fails above ${fails}`;
 }
 
 /** A verdict in words with its mark. */

@@ -1,6 +1,6 @@
 import "../look.css";
 import type { Workbook } from "../workbook/workbook";
-import { brokenText } from "./function-page";
+import { brokenView } from "./broken";
 import { functionsView } from "./functions-view";
 import { h, setAttribute } from "./h";
 import { head } from "./head";
@@ -25,17 +25,17 @@ export function mountPane(root: HTMLElement, workbook: Workbook): void {
       );
       return new Map<string, Words>();
     })
-    .then((words) => run(root, place, [functionsView(words, workbook)]));
+    .then((words) => run(place, [functionsView(words, workbook)]));
 }
 
 /** Shows the view that the address asks for, now and whenever the address changes. */
-function run(root: HTMLElement, place: HTMLElement, views: readonly View[]): void {
+function run(place: HTMLElement, views: readonly View[]): void {
   const tabs = views.length > 1 ? viewTabs(views) : undefined;
   if (tabs) place.before(tabs);
   let shown: string | undefined;
   const show = () => {
     // A pane mounted anew leaves this one behind.
-    if (!root.contains(place)) return removeEventListener("hashchange", show);
+    if (shown !== undefined && !place.isConnected) return removeEventListener("hashchange", show);
     const address = addressNow();
     const view = views.find((each) => each.opens(address)) ?? views[0];
     place.replaceChildren(guarded(() => view.show(address)));
@@ -68,12 +68,7 @@ function guarded(show: () => HTMLElement): HTMLElement {
   try {
     return show();
   } catch (error) {
-    return h(
-      "div",
-      {},
-      h("a", { class: "back", href: "#" }, labels.allFunctions),
-      h("p", { class: "problem" }, brokenText(error)),
-    );
+    return h("div", {}, h("a", { class: "back", href: "#" }, labels.allFunctions), brokenView(error));
   }
 }
 

@@ -2,12 +2,12 @@ import { isTable, type Entry } from "../../functions/cells/entry";
 import type { Result } from "../../functions/cells/evaluate";
 import { prettyUnit } from "../../functions/cells/format";
 import { h } from "./h";
+import { labels } from "./labels";
 import { numberText } from "./number-text";
 
 /** A result as the pane shows it, by its form: one value, or what spills. */
 export function resultView(entry: Entry<any>, result: Result, unit: string): HTMLElement {
-  const single = result.length === 1 && result[0].length === 1;
-  if (single && (!isTable(entry.result) || problemOf(result) !== undefined)) return valueView(result[0][0], unit);
+  if (result.length === 1 && result[0].length === 1) return valueView(result[0][0], unit);
   return tableView(entry, result);
 }
 
@@ -21,7 +21,13 @@ function valueView(cell: Result[number][number], unit: string): HTMLElement {
   if (typeof cell === "object") return h("p", { class: "problem" }, h("code", {}, cell.code), " ", cell.message);
   if (cell === "") return h("p", { class: "value none" }, "Blank, as the inputs are.");
   if (typeof cell !== "number") return h("p", { class: "value words" }, cellText(cell));
-  return h("p", { class: "value" }, numberText(cell), unit && h("span", { class: "unit" }, ` ${prettyUnit(unit)}`));
+  // The unit is in sight as the choice beside the value; read out it belongs to the number.
+  return h(
+    "p",
+    { class: "value" },
+    numberText(cell),
+    unit !== "" && h("span", { class: "unseen" }, ` ${prettyUnit(unit)}`),
+  );
 }
 
 const rowsShown = 12;
@@ -48,7 +54,7 @@ function tableView(entry: Entry<any>, result: Result): HTMLElement {
   return h(
     "div",
     { class: "spill" },
-    h("div", { class: "scroller", tabindex: 0, role: "group", "aria-label": "Spilled table" }, table),
+    h("div", { class: "scroller", tabindex: 0, role: "group", "aria-label": labels.spilledTable }, table),
     hidden > 0 && h("p", { class: "more" }, `${hidden} more ${hidden === 1 ? "row" : "rows"} in the sheet.`),
   );
 }

@@ -1,7 +1,8 @@
 import { conversionTo } from "../../functions/cells/quantity-text";
 import type { Quantity } from "../../functions/cells/quantities";
 
-/** Units the trade writes results in; the ones that fit a quantity are offered for it, and any other may be typed. */
+/** Units the trade writes results in; those that fit a quantity are offered for it, and a formula takes any other. */
+// prettier-ignore
 const candidates = [
   "m", "cm", "mm", "um", "nm",
   "m/s", "km/s", "cm/s", "nm/min",
@@ -23,7 +24,7 @@ const candidates = [
   "kg", "g", "u",
   "kg/m^3", "g/cm^3",
   "deg", "rad",
-]; // prettier-ignore
+];
 
 /** The quantity's own unit first. */
 export function unitsOffered(quantity: Quantity): string[] {

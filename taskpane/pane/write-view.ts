@@ -1,4 +1,5 @@
 import type { CellPlace, Workbook } from "../workbook/workbook";
+import { breakable } from "./breakable";
 import { h } from "./h";
 import { labels } from "./labels";
 
@@ -29,7 +30,7 @@ export function writeView(workbook: Workbook): WriteView {
     if (next !== formula) say("");
     formula = next;
     problem = refused;
-    shown.textContent = next;
+    shown.replaceChildren(...breakable(next));
   };
   return { element, offer };
 }
