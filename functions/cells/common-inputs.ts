@@ -18,3 +18,6 @@ export const T_i = optional(
 
 export const edge_ratio = optional(quantityInput("edge_ratio", quantities.ratio, { most: 1 }), freeEdgeRatio);
 export const lambda_i = quantityInput("lambda_i", quantities.length);
+
+/** The drop across a sheath, a magnitude whose sign is ignored: no drop at all is a blank, not a sheath. */
+export const V_s = quantityInput("V_s", quantities.drop, { zeroIsValue: false });
