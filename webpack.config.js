@@ -5,7 +5,7 @@ import { EsbuildPlugin } from "esbuild-loader";
 import MiniCssExtractPlugin from "mini-css-extract-plugin";
 import webpack from "webpack";
 import { FunctionsJsonPlugin } from "./manifest/build/functions-json.js";
-import { allowVendor, fromVendor, hostLibrary } from "./manifest/build/host-library.js";
+import { allowVendor, fromVendor, hostLibrary, readOffice } from "./manifest/build/host-library.js";
 import { IconsPlugin } from "./manifest/build/icons.js";
 import { Licences } from "./manifest/build/licences.js";
 import { policy, PolicyPlugin } from "./manifest/build/policy.js";
@@ -56,7 +56,7 @@ const common = (origin) => ({
  */
 export default (env = {}) => {
   const origin = readOrigin(env.origin);
-  const hosted = env.office === "hosted";
+  const hosted = readOffice(env.office) === "hosted";
   const licences = new Licences();
 
   const bundle = (name, entry, ...plugins) => {

@@ -17,6 +17,12 @@ const loaded = [
   "en-us/office_strings.js",
 ];
 
+/** Where pages take the host library from. */
+export function readOffice(text = "built") {
+  if (text === "built" || text === "hosted") return text;
+  throw new Error(`--env office=${text}: give built or hosted`);
+}
+
 /** The host library as files to copy; where pages take it from its vendor, only what the trial sheet runs on. */
 export function hostLibrary(hosted) {
   const files = hosted ? ["custom-functions-runtime.js"] : [...scripts, ...loaded];

@@ -1,3 +1,4 @@
+import { randomUUID } from "node:crypto";
 import { mkdtemp, readFile, rm, writeFile } from "node:fs/promises";
 import { createRequire } from "node:module";
 import { tmpdir } from "node:os";
@@ -23,17 +24,22 @@ export async function stamp(xml, { origin, version, id, name }) {
       element.setAttribute("DefaultValue", origin + address.slice(sourceOrigin.length));
   }
   const own = page.getElementsByTagName("Id")[0].textContent;
-  return renamed(new XMLSerializer().serializeToString(page), id ?? own, name);
+  return renamed(new XMLSerializer().serializeToString(page), readId(id ?? own), name);
 }
 
-/** Id and name through the platform's own tool, which also refuses what it cannot read; it works on files alone. */
+/** The same copy keeps its id from build to build, so it is given, not made up here. */
+function readId(id) {
+  if (/^[\da-f]{8}(-[\da-f]{4}){3}-[\da-f]{12}$/i.test(id)) return id;
+  throw new Error(`--env id=${id}: give a UUID of your own, such as ${randomUUID()}`);
+}
+
+/** Id and name through the platform's own tool, which works on files alone. */
 async function renamed(xml, id, name) {
   const folder = await mkdtemp(join(tmpdir(), "manifest-"));
   const file = join(folder, "manifest.xml");
   try {
     await writeFile(file, xml);
-    const read = await OfficeAddinManifest.modifyManifestFile(file, id, name);
-    if (read.id !== id) throw new Error(`manifest.xml: no id in it after stamping`);
+    await OfficeAddinManifest.modifyManifestFile(file, id, name);
     return await readFile(file, "utf8");
   } finally {
     await rm(folder, { recursive: true });

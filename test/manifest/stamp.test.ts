@@ -41,6 +41,12 @@ test("a copy under another name and id keeps everything else", async () => {
   expect(stamped).toContain('<DisplayName DefaultValue="Wallfall &amp; friends"/>');
 });
 
+test("an id that is none gets one offered", async () => {
+  await expect(stamp(source, { ...facts, id: "random" })).rejects.toThrow(
+    /give a UUID of your own, such as [\da-f-]{36}$/,
+  );
+});
+
 test("a manifest that is not well-formed is refused, not mended", async () => {
   await expect(stamp(source.replace("</Hosts>", ""), facts)).rejects.toThrow(/manifest.xml/);
 });
