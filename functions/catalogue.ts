@@ -3,6 +3,7 @@ import { checksOver } from "./checks/entries";
 import { edge } from "./edge/entries";
 import { helpers } from "./helpers/entries";
 import { ionMix } from "./ion-mix/entries";
+import { layer } from "./layer/entries";
 import { magnetised } from "./magnetised/entries";
 import { negativeIons } from "./negative-ions/entries";
 import { rf } from "./rf/entries";
@@ -15,6 +16,7 @@ export const checks = checksOver({ named: entryNamed, all: () => catalogue });
 export const families: readonly Family[] = [
   edge,
   wall,
+  layer,
   rf,
   negativeIons,
   ionMix,

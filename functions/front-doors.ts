@@ -2,6 +2,7 @@ import * as checks from "./checks/functions";
 import * as edge from "./edge/functions";
 import * as helpers from "./helpers/functions";
 import * as ionMix from "./ion-mix/functions";
+import * as layer from "./layer/functions";
 import * as magnetised from "./magnetised/functions";
 import * as negativeIons from "./negative-ions/functions";
 import * as rf from "./rf/functions";
@@ -14,6 +15,7 @@ export const frontDoors: Readonly<Record<string, FrontDoor>> = Object.fromEntrie
   [
   edge,
   wall,
+  layer,
   rf,
   negativeIons,
   ionMix,
