@@ -38,18 +38,31 @@ export function judgeAll(entry: Entry<any>, values: readonly unknown[]): Verdict
 export function verdictText({ limit, word, value, needs }: Verdict): string {
   if (word === "not tested") return `not tested: give ${needs}`;
   if (word === "holds") return "holds";
-  const measured = `${limit.measure} ${format(value!)} (${format(limit.holds)}…${format(limit.fails)})`;
+  const measured = `${limit.measure} ${telling(limit, value!, word)} (${format(limit.holds)}…${format(limit.fails)})`;
   return word === "marginal" ? `marginal: ${measured}` : `fails: ${limit.reason}: ${measured}`;
+}
+
+/** "holds up to 0.1, fails above 0.5": the bounds in the order in which the measure meets them. */
+export function boundsText(limit: Limit): string {
+  const [holds, fails] = [format(limit.holds), format(limit.fails)];
+  if (limit.holds === limit.fails) return `holds from ${holds} up, else fails`;
+  return limit.holds > limit.fails
+    ? `holds from ${holds} up, fails below ${fails}`
+    : `holds up to ${holds}, fails above ${fails}`;
+}
+
+/** The measure in so many digits that it stands on the side of the bounds where it is: 2.998 of 3, not 3 of 3. */
+function telling(limit: Limit, value: number, word: Word): string {
+  let digits = 3;
+  while (digits < 15 && wordFor(limit, Number(format(value, digits))) !== word) digits++;
+  return format(value, digits);
 }
 
 const rank: Record<Word, number> = { fails: 3, marginal: 2, holds: 1, "not tested": 0 };
 
 /** The worst of several verdicts, the first of its kind. */
 export function worst(verdicts: readonly Verdict[]): Verdict | undefined {
-  return verdicts.reduce<Verdict | undefined>(
-    (found, each) => (found === undefined || rank[each.word] > rank[found.word] ? each : found),
-    undefined,
-  );
+  return verdicts.reduce<Verdict | undefined>(worse, undefined);
 }
 
 /** The worst verdict of an entry's limits at these inputs; undefined where none applies. */
@@ -57,9 +70,13 @@ export function worstOf(entry: Entry<any>, values: readonly unknown[]): Verdict 
   let found: Verdict | undefined;
   for (const limit of entry.limits) {
     const verdict = judge(limit, values);
-    if (verdict && (found === undefined || rank[verdict.word] > rank[found.word])) found = verdict;
+    if (verdict) found = worse(found, verdict);
   }
   return found;
+}
+
+function worse(found: Verdict | undefined, next: Verdict): Verdict {
+  return found === undefined || rank[next.word] > rank[found.word] ? next : found;
 }
 
 /** A model that has no solution fails, with the reason its own message gives. */

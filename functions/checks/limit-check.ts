@@ -79,7 +79,8 @@ function checked(entry: Entry, values: readonly unknown[]): string | CellError {
   }
 }
 
-function problemWith(entry: Entry, result: unknown): Fault | CellError | undefined {
+/** Why a model gave no usable result. */
+export function problemWith(entry: Entry, result: unknown): Fault | CellError | undefined {
   if (result instanceof Fault) return result;
   if (typeof result === "number") return Number.isFinite(result) ? undefined : notFinite(entry, result);
   if (!Array.isArray(result)) return undefined;
