@@ -83,14 +83,15 @@ export function distance(low: number, high: number, mu: number): number {
 
 /**
  * In ln η the integrand 1/steepness is smooth from the edge to the wall for every μ: its poles and branch points stay
- * 1.6 or more off the real axis. Twenty points on three units of ln η then leave an error below 1e-15.
+ * 1.6 or more off the real axis. Twenty points on three units of ln η, or eight on half a unit, leave less than 1e-15.
  */
 function quadrature(low: number, high: number, mu: number): number {
   const span = Math.log1p((high - low) / low);
-  return integrate((t) => 1 / steepness(low * Math.exp(t), mu), 0, span, rule, 3);
+  return integrate((t) => 1 / steepness(low * Math.exp(t), mu), 0, span, span > 0.5 ? twenty : eight, 3);
 }
 
-const rule = gaussLegendre(20);
+const twenty = gaussLegendre(20);
+const eight = gaussLegendre(8);
 
 /** Beyond this drop e^(−η) is below the last bit, and the distance has a closed form. */
 const electronsEnd = 38;
