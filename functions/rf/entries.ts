@@ -1,11 +1,12 @@
 import { edge_ratio, lambda_i, n_bulk, n_edge, T_e } from "../cells/common-inputs";
 import { entry, type Family } from "../cells/entry";
-import { badInput } from "../cells/fault";
 import { ionInput, optional, quantityInput, wordInput } from "../cells/inputs";
 import { quantities } from "../cells/quantities";
 import { manyInDebyeSphere } from "../edge/limits";
+import { missingPath } from "../layer/inputs";
+import { ionMotions, ionTransitTime } from "../layer/model";
 import { BB68, GE62, L88, L89, LL } from "../sources";
-import { highVoltage, manyPeriodsInTransit, neverReverses, pathSuitsModel, repelsAtTheTop } from "./limits";
+import { highVoltage, manyPeriodsInTransit, neverReverses, pathSuitsRf, repelsAtTheTop } from "./limits";
 import * as model from "./model";
 
 const first = { "1.0.0": "first version" };
@@ -34,7 +35,7 @@ export const IONENERGYSPREAD = entry("IONENERGYSPREAD", {
   compute: (V_dc, V_rf, s, f, ion) => model.ionEnergySpread(Math.abs(V_dc), V_rf, s, f, ion),
   equation: String.raw`\Delta E = \frac{8 Z V_\mathrm{rf}}{3\,\omega s} \sqrt{\frac{2 Z e V_\mathrm{dc}}{M}} \;\le\; 2 Z V_\mathrm{rf}, \qquad \omega = 2\pi f`,
   limits: [
-    manyPeriodsInTransit((V_dc, _V_rf, s, f, ion) => f * model.rfTransitTime(Math.abs(V_dc), s, ion)),
+    manyPeriodsInTransit((V_dc, _V_rf, s, f, ion) => f * ionTransitTime(Math.abs(V_dc), s, ion)),
     neverReverses((V_dc, V_rf) => [V_rf, V_dc]),
   ],
   sources: [BB68],
@@ -44,23 +45,15 @@ export const IONENERGYSPREAD = entry("IONENERGYSPREAD", {
 });
 
 export const RFCHILDCURRENT = entry("RFCHILDCURRENT", {
-  inputs: [
-    V_dc,
-    s_m,
-    ionInput(),
-    optional(wordInput("model", model.rfChildModels), "collisionless"),
-    optional(lambda_i),
-  ],
+  inputs: [V_dc, s_m, ionInput(), optional(wordInput("model", ionMotions), "collisionless"), optional(lambda_i)],
   result: quantities.currentDensity,
   compute: (V_dc, s_m, ion, word, lambda_i) => {
     const V = Math.abs(V_dc);
     if (word === "collisionless") return model.rfChildCurrent(V, s_m, ion);
-    return lambda_i === undefined
-      ? badInput("lambda_i", 'it is blank while model is "collisional"', "type a mean free path such as 1 mm")
-      : model.rfChildCurrentCollisional(V, s_m, ion, lambda_i);
+    return lambda_i === undefined ? missingPath() : model.rfChildCurrentCollisional(V, s_m, ion, lambda_i);
   },
   equation: String.raw`J = \begin{cases} \dfrac{200}{243}\,\varepsilon_0 \sqrt{\dfrac{2Ze}{M}}\, \dfrac{V_\mathrm{dc}^{3/2}}{s_m^2} & \text{collisionless} \\ 1.678148\,\varepsilon_0 \sqrt{\dfrac{2Ze}{M}}\, \dfrac{V_\mathrm{dc}^{3/2} \lambda_i^{1/2}}{s_m^{5/2}} & \text{collisional} \end{cases}`,
-  limits: pathSuitsModel((_V_dc, s_m, _ion, word, lambda_i) => [s_m, word, lambda_i]),
+  limits: pathSuitsRf((_V_dc, s_m, _ion, word, lambda_i) => [word, s_m, lambda_i]),
   sources: [L88, L89],
   changes: first,
   example: [300, 0.005, "Ar+"],

@@ -1,5 +1,6 @@
-import { NotTested, type Limit } from "../cells/entry";
+import type { Limit } from "../cells/entry";
 import { format } from "../cells/format";
+import { pathSuits, type Motion } from "../layer/limits";
 import { ionOfMass } from "../matter/ion";
 import { GE62, L88, L89, BB68 } from "../sources";
 import { floatingPotential } from "../wall/model";
@@ -75,33 +76,16 @@ export function highVoltage(of: Of<[V_dc: number, T_e: number]>): Limit {
   };
 }
 
-/** Either law against the mean free path. */
-export function pathSuitsModel(
-  of: Of<[s_m: number, model: model.RfChildModel, lambda_i: number | undefined]>,
-): readonly [Limit, Limit] {
-  const ratio = (wanted: model.RfChildModel) =>
-    ((...values: any[]) => {
-      const [s_m, chosen, lambda_i] = of(...values);
-      if (chosen !== wanted) return undefined;
-      return lambda_i === undefined ? new NotTested("lambda_i") : lambda_i / s_m;
-    }) satisfies Limit["value"];
+/** Either law against the mean free path, as for a steady sheath. */
+export function pathSuitsRf(of: Of<Motion>): readonly [Limit, Limit] {
+  const [free, colliding] = pathSuits(of);
   return [
+    { ...free, measure: "λ_i/s_m", source: L88 },
     {
-      assumption: "ions cross the sheath without a collision",
+      ...colliding,
       measure: "λ_i/s_m",
-      value: ratio("collisionless"),
-      holds: 3,
-      fails: 1,
-      reason: 'ions collide inside the sheath; take model "collisional"',
-      source: L88,
-    },
-    {
-      assumption: "ions collide many times in the sheath",
-      measure: "λ_i/s_m",
-      value: ratio("collisional"),
-      holds: 0.1,
       fails: equalLaws,
-      reason: `beyond λ_i/s_m = ${format(equalLaws)} the collisional law gives more current than free fall; take model "collisionless"`,
+      reason: `beyond λ_i/s_m = ${format(equalLaws)} the collisional law gives more current than free fall; take the collisionless one`,
       source: L89,
     },
   ];

@@ -1,11 +1,12 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { judgeAll } from "../../functions/cells/verdict";
+import { ionTransitTime } from "../../functions/layer/model";
 import { e, u } from "../../functions/matter/constants";
 import type { Ion } from "../../functions/matter/ion";
 import { IONENERGYSPREAD as entry } from "../../functions/rf/entries";
 import { IONENERGYSPREAD } from "../../functions/rf/functions";
-import { ionEnergySpread, rfTransitTime } from "../../functions/rf/model";
+import { ionEnergySpread } from "../../functions/rf/model";
 import reference from "../published/rf.json";
 
 const argon: Ion = { mass: 39.95 * u, charge: 1, label: "Ar+" };
@@ -14,9 +15,9 @@ const argon: Ion = { mass: 39.95 * u, charge: 1, label: "Ar+" };
 function arrivalEnergy(V_dc: number, V_rf: number, s: number, f: number, phase: number): number {
   const field = (y: number, t: number) =>
     ((4 / 3) * Math.cbrt(y / s) * (V_dc + V_rf * Math.sin(2 * Math.PI * f * t + phase))) / s;
-  const dt = rfTransitTime(V_dc, s, argon) / 20000;
+  const dt = ionTransitTime(V_dc, s, argon) / 20000;
   // Child's law lets ions start at rest; the first step follows its own y ∝ t³ through the mean field.
-  let t = 1e-3 * rfTransitTime(V_dc, s, argon);
+  let t = 1e-3 * ionTransitTime(V_dc, s, argon);
   let y = s * 1e-9;
   let v = (3 * y) / t;
   for (; y < s; t += dt) {
@@ -31,7 +32,7 @@ describe("IONENERGYSPREAD", () => {
   test("ions followed through a swinging sheath spread as Benoit-Cattin & Bernard say", () => {
     // Source: an independent integration of the equation of motion; 7 periods in a transit, good to a few per cent.
     const [V_dc, V_rf, s] = [200, 20, 0.01];
-    const f = 7 / rfTransitTime(V_dc, s, argon);
+    const f = 7 / ionTransitTime(V_dc, s, argon);
     const energies = Array.from({ length: 48 }, (_, k) => arrivalEnergy(V_dc, V_rf, s, f, (2 * Math.PI * k) / 48));
     const spread = Math.max(...energies) - Math.min(...energies);
     expect(spread / ionEnergySpread(V_dc, V_rf, s, f, argon)).toBeGreaterThan(0.9);
@@ -40,7 +41,7 @@ describe("IONENERGYSPREAD", () => {
 
   test("the spread is 8 Z V_rf over ω times the transit time", () => {
     // Source: Kawamura et al., Plasma Sources Sci. Technol. 8 (1999) R45 (from memory).
-    const transit = rfTransitTime(300, 0.005, argon);
+    const transit = ionTransitTime(300, 0.005, argon);
     expect(ionEnergySpread(300, 100, 0.005, 13.56e6, argon) / (800 / (2 * Math.PI * 13.56e6 * transit))).toBeCloseTo(
       1,
       14,
