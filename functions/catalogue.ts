@@ -1,6 +1,7 @@
 import type { Entry, Family } from "./cells/entry";
 import { checksOver } from "./checks/entries";
 import { edge } from "./edge/entries";
+import { electrons } from "./electrons/entries";
 import { helpers } from "./helpers/entries";
 import { ionMix } from "./ion-mix/entries";
 import { layer } from "./layer/entries";
@@ -20,6 +21,7 @@ export const families: readonly Family[] = [
   rf,
   negativeIons,
   ionMix,
+  electrons,
   magnetised,
   checks.family,
   helpers,

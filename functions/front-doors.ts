@@ -1,5 +1,6 @@
 import * as checks from "./checks/functions";
 import * as edge from "./edge/functions";
+import * as electrons from "./electrons/functions";
 import * as helpers from "./helpers/functions";
 import * as ionMix from "./ion-mix/functions";
 import * as layer from "./layer/functions";
@@ -19,6 +20,7 @@ export const frontDoors: Readonly<Record<string, FrontDoor>> = Object.fromEntrie
   rf,
   negativeIons,
   ionMix,
+  electrons,
   magnetised,
   checks,
   helpers,

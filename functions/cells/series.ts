@@ -14,6 +14,8 @@ export interface Series {
   values: Float64Array;
   /** Whether the cell is empty, or a 0 that may be an empty cell: the host sends both alike. */
   blank: Uint8Array;
+  /** Whether the cell is a heading. */
+  heading: Uint8Array;
   /** Cells that hold no number, such as "OL"; blanks and headings are not counted. */
   unread: number;
   /** What the first of them says. */
@@ -43,10 +45,11 @@ function readSeries(name: string, quantity: Quantity, rows: unknown[][]): Series
     name,
     values: new Float64Array(length).fill(NaN),
     blank: new Uint8Array(length),
+    heading: new Uint8Array(length),
     unread: 0,
     errors: new Set(),
   };
-  const state = { series, quantity, heading: undefined as Conversion | undefined, begun: false };
+  const state = { series, quantity, inForce: undefined as Conversion | undefined, begun: false };
   for (let i = 0; i < length; i++) {
     const fault = readCell(state, cells[i], i);
     if (fault) return fault;
@@ -58,7 +61,7 @@ interface State {
   series: Series;
   quantity: Quantity;
   /** Conversion of bare numbers from the unit in the last heading. */
-  heading: Conversion | undefined;
+  inForce: Conversion | undefined;
   /** Whether a number has been met. */
   begun: boolean;
 }
@@ -69,7 +72,7 @@ const noReading = 9.9e37;
 function readCell(state: State, cell: unknown, i: number): Fault | undefined {
   const { series } = state;
   if (typeof cell === "number" && Math.abs(cell) < noReading) {
-    series.values[i] = own(cell, state.heading);
+    series.values[i] = own(cell, state.inForce);
     if (cell === 0) series.blank[i] = 1;
     else state.begun = true;
   } else if (typeof cell === "number") {
@@ -97,29 +100,33 @@ function readText(state: State, text: string, i: number): Fault | undefined {
   if (/^[+\-−]?[.,]?\d/.test(text)) {
     const value = readQuantityText(series.name, quantity, text);
     if (value instanceof Fault) return new Fault(value.code, `Row ${i + 1}, ${value.message}`);
-    series.values[i] = /[^\d.,eE+\-−\s]/.test(text) ? value : own(value, state.heading);
+    const bare = !/[^\d.,eE+\-−\s]/.test(text);
+    if (Math.abs(value) >= noReading) countUnread(series, text);
+    else series.values[i] = bare ? own(value, state.inForce) : value;
     state.begun = true;
     return undefined;
   }
   if (isInstrumentWord(text)) countUnread(series, text);
-  else return readHeading(state, text);
+  else return readHeading(state, text, i);
   return undefined;
 }
 
 /** Text above the numbers is a heading, and so is a later one that names a unit; other text between numbers is no reading. */
-function readHeading(state: State, text: string): Fault | undefined {
+function readHeading(state: State, text: string, i: number): Fault | undefined {
   const { series, quantity } = state;
   const unitText = unitInHeading(text);
   if (unitText === undefined || !parseUnit(unitText)) {
     if (state.begun) countUnread(series, text);
+    else series.heading[i] = 1;
     return undefined;
   }
+  series.heading[i] = 1;
   const conversion = conversionTo(quantity, unitText);
   if (!conversion) {
     const wanted = `select a column of ${quantity.name}, or mend its heading`;
     return badInput(series.name, `"${text}" heads a column that is not ${article(quantity.name)}`, wanted);
   }
-  state.heading = conversion;
+  state.inForce = conversion;
   if (conversion.scale !== 1 || conversion.offset !== 0) series.unit = unitText;
   return undefined;
 }
@@ -129,8 +136,8 @@ function countUnread(series: Series, text: string): void {
   series.word ??= text;
 }
 
-function own(value: number, heading: Conversion | undefined): number {
-  return heading ? value * heading.scale + heading.offset : value;
+function own(value: number, inForce: Conversion | undefined): number {
+  return inForce ? value * inForce.scale + inForce.offset : value;
 }
 
 /** "I (mA)", "I [mA]", "I / mA", "I, mA": the text where a heading names its unit. */
