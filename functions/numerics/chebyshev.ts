@@ -6,9 +6,11 @@
 export function chebyshev(f: (x: number) => number, a: number, b: number, terms: number): (x: number) => number {
   const middle = (a + b) / 2;
   const half = (b - a) / 2;
-  const values = Array.from({ length: terms }, (_, k) => f(middle + half * Math.cos((Math.PI * (k + 0.5)) / terms)));
+  // Whole turns are taken off while the angle is a whole number, so that no digit is lost to them.
+  const cosine = (j: number, k: number) => Math.cos((Math.PI * ((j * (2 * k + 1)) % (4 * terms))) / (2 * terms));
+  const values = Array.from({ length: terms }, (_, k) => f(middle + half * cosine(1, k)));
   const coefficients = Float64Array.from({ length: terms }, (_, j) => {
-    const sum = values.reduce((total, value, k) => total + value * Math.cos((Math.PI * j * (k + 0.5)) / terms), 0);
+    const sum = values.reduce((total, value, k) => total + value * cosine(j, k), 0);
     return ((j === 0 ? 1 : 2) / terms) * sum;
   });
   return (x) => {
