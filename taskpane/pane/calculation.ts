@@ -48,10 +48,13 @@ export function calculationView(
     const result = frontDoors[entry.name](...args);
     const standing = standings(entry, args);
     showLimits(limitsView(standing));
-    markFields(entry, views, args, problemOf(result));
-    const sum = summary(standing);
+    const problem = problemOf(result);
+    const doubted = doubts(entry, args);
+    markFields(entry, views, doubted, problem);
+    const sum = summary(standing, [...doubted.keys()]);
+    if (unit) unit.hidden = problem !== undefined;
     outcome.replaceChildren(resultView(entry, result, resultUnit(entry, unit?.value ?? "")));
-    verdict.replaceChildren(...(sum ? [verdictLine(sum.verdict.word, sum.text)] : []));
+    verdict.replaceChildren(...(sum ? [verdictLine(sum.word, sum.text)] : []));
     const formula = formulaText(entry.name, typed);
     write.offer(formula, formulaProblem(formula, typed));
   };
@@ -72,27 +75,30 @@ export function calculationView(
     ...views.map(({ element }) => element),
   );
   unit?.addEventListener("input", soon);
-  return [
-    ...(views.length > 0 ? [section(labels.inputs, form)] : []),
-    h(
-      "section",
-      { class: "result" },
-      h("h3", {}, labels.result),
-      h("div", { class: "outcome" }, outcome, unit && h("label", { class: "unseen", for: unit.id }, labels.unit), unit),
-      verdict,
-    ),
-    write.element,
-  ];
+  const shown = h(
+    "section",
+    { class: "result" },
+    h("h3", {}, labels.result),
+    h("div", { class: "outcome" }, outcome, unit && h("label", { class: "unseen", for: unit.id }, labels.unit), unit),
+    verdict,
+  );
+  form.addEventListener("focusin", ({ target }) => clear(target as HTMLElement, shown));
+  return [...(views.length > 0 ? [section(labels.inputs, form)] : []), shown, write.element];
+}
+
+/** The result stays in sight below the inputs, but never over the one that has the focus. */
+function clear(control: HTMLElement, result: HTMLElement): void {
+  const covered = control.getBoundingClientRect().bottom > result.getBoundingClientRect().top;
+  if (covered) control.scrollIntoView?.({ block: "center" });
 }
 
 /** A message begins with the name of the input it is about: that field is marked. */
 function markFields(
   entry: Entry<any>,
   views: readonly FieldView[],
-  args: readonly unknown[],
+  doubted: ReadonlyMap<string, string>,
   problem: string | undefined,
 ): void {
-  const doubted = doubts(entry, args);
   entry.inputs.forEach(({ name }: { name: string }, i: number) => {
     const refused = problem !== undefined && new RegExp(`^${name}(:| is blank)`).test(problem);
     views[i].mark(doubted.get(name), refused);

@@ -24,7 +24,7 @@ type Control = FieldView["control"];
 const typing: Record<Field["takes"], string> = {
   cell: "",
   range: "a range: commas between cells, a line for each row",
-  arguments: "a line for each argument",
+  arguments: "a line for each argument; in a range commas between columns, semicolons between rows",
 };
 
 export function fieldView({ name, meaning, takes, input }: Field & { input: Input }, text: string): FieldView {

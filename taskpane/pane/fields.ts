@@ -1,7 +1,7 @@
 import { isTable, type Entry } from "../../functions/cells/entry";
 import type { Input } from "../../functions/cells/inputs";
 import { typedArguments, type FieldText } from "./formula";
-import { typedText } from "./typed";
+import { typedRows, typedText } from "./typed";
 import type { Words } from "./words";
 
 /** One argument of a function as the form asks for it. */
@@ -43,9 +43,8 @@ export function exampleTexts(entry: Entry<any>, fields: readonly Field[]): strin
   );
 }
 
-/** A further argument takes one line: a row of cells. */
 function typedLine(cell: unknown): string {
-  return typedText(cell).replaceAll("\n", ", ");
+  return typedRows(Array.isArray(cell) ? cell : [[cell]], "; ");
 }
 
 /** The fields as the arguments that the function's front door gets from a sheet. */

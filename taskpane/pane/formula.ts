@@ -1,4 +1,4 @@
-import { readTyped, readTypedBlock, type Typed } from "./typed";
+import { readTyped, readTypedArguments, readTypedBlock, type Typed } from "./typed";
 
 /** One field's text, and what it stands for: a cell, a range, or any number of further arguments. */
 export interface FieldText {
@@ -11,7 +11,7 @@ export interface FieldText {
 export function typedArguments({ text, takes }: FieldText): Typed[][][] {
   if (takes === "cell") return [[[readTyped(text)]]];
   if (takes === "range") return [readTypedBlock(text)];
-  return text.trimEnd().split(/\r?\n/).map(readTypedBlock);
+  return readTypedArguments(text);
 }
 
 /** What a cell takes; text inside a formula has a limit of its own. */

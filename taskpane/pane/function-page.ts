@@ -20,7 +20,7 @@ export function functionPage(
   const calculation = calculationView(entry, words, drafts, workbook, (next) => limits.replaceChildren(next));
   return h(
     "article",
-    { class: "page" },
+    { class: "page", "data-function": entry.name },
     h("nav", { "aria-label": labels.back }, h("a", { class: "back", href: "#" }, labels.allFunctions)),
     h("h2", { tabindex: -1 }, entry.name),
     words?.meaning && h("p", { class: "lead" }, words.meaning),

@@ -5,7 +5,9 @@ export function numberText(value: number, digits = 7): string {
   const text = size >= 1e6 || size < 1e-3 ? value.toExponential(digits - 1) : value.toPrecision(digits);
   const [mantissa, power] = text.replace("-", "−").split("e");
   const short = mantissa.includes(".") ? mantissa.replace(/\.?0+$/, "") : mantissa;
-  return power === undefined ? short : `${short} × 10${superscript(power)}`;
+  if (power === undefined) return short;
+  const factor = short.replace(/^(−?)1$/, "$1");
+  return `${factor}${/\d/.test(factor) ? " × " : ""}10${superscript(power)}`;
 }
 
 function superscript(power: string): string {

@@ -2,7 +2,8 @@ import type { Entry, Limit } from "../../functions/cells/entry";
 import { readInputs } from "../../functions/cells/evaluate";
 import { Fault } from "../../functions/cells/fault";
 import { doubtOf } from "../../functions/cells/inputs";
-import { judge, verdictText, worst, type Verdict } from "../../functions/cells/verdict";
+import { judge, verdictText, worst, type Verdict, type Word } from "../../functions/cells/verdict";
+import { labels } from "./labels";
 
 /** A limit at the inputs of the moment: its verdict, or that it does not apply, or that the inputs are not complete. */
 export interface Standing {
@@ -26,14 +27,18 @@ function valuesAt(entry: Entry<any>, args: readonly unknown[]): unknown[] | unde
   return reading.columns.map(({ values }) => values[0]);
 }
 
-/** The worst of all as one line, and how many could not be tested beside it. */
-export function summary(standings: readonly Standing[]): { verdict: Verdict; text: string } | undefined {
+/** The worst of all as one line; what could not be tested, and which inputs are doubted, beside it. */
+export function summary(
+  standings: readonly Standing[],
+  doubted: readonly string[],
+): { word: Word; text: string } | undefined {
   const verdicts = standings.map(({ verdict }) => verdict).filter((verdict) => typeof verdict !== "string");
   const verdict = worst(verdicts);
-  if (!verdict) return undefined;
-  const untested = verdicts.filter(({ word }) => word === "not tested").length;
-  const rest = verdict.word === "not tested" || untested === 0 ? "" : `; ${untested} not tested`;
-  return { verdict, text: verdictText(verdict) + rest };
+  const doubt = doubted.length > 0 && `${labels.doubtfulInput}: ${doubted.join(", ")}`;
+  if (!verdict) return doubt ? { word: labels.notTested, text: doubt } : undefined;
+  const untested = verdicts.filter(({ word }) => word === labels.notTested).length;
+  const rest = verdict.word !== labels.notTested && untested > 0 && `${untested} ${labels.notTested}`;
+  return { word: verdict.word, text: [verdictText(verdict), rest, doubt].filter((part) => part !== false).join("; ") };
 }
 
 /** Why the value of each input is doubted, by its name. */

@@ -29,23 +29,65 @@ export function readTyped(text: string): Typed {
 
 /** Rows by line, columns by comma, semicolon or tab, so that cells copied from a sheet can be pasted. */
 export function readTypedBlock(text: string): Typed[][] {
-  const lines = text.split(/\r?\n/).filter((line) => line.trim() !== "");
-  return lines.map((line) =>
-    line
-      .replace(/[,;\t]\s*$/, "")
-      .split(/[,;\t]/)
-      .map(readTyped),
-  );
+  return rowsOf(partsOf(text, ",;\t\n"), "\n");
+}
+
+/** Arguments by line, and in each rows by semicolon and columns by comma, as in an array constant. */
+export function readTypedArguments(text: string): Typed[][][] {
+  return grouped(partsOf(text.trimEnd(), ",;\t\n"), "\n").map((line) => rowsOf(line, ";"));
+}
+
+/** A piece of the text and the separator behind it. */
+interface Part {
+  text: string;
+  separator: string | undefined;
+}
+
+/** A part that stands in quotes as a whole keeps the separators inside it. */
+function partsOf(text: string, separators: string): Part[] {
+  const part = new RegExp(`[^\\S${separators}]*"(?:[^"]|"")*"\\s*?(?=[${separators}]|$)|[^${separators}]*`, "y");
+  const parts: Part[] = [];
+  for (let at = 0; at <= text.length; at = part.lastIndex + 1) {
+    part.lastIndex = at;
+    const [found] = part.exec(text)!;
+    part.lastIndex = at + found.length;
+    parts.push({ text: found, separator: text[part.lastIndex] });
+  }
+  return parts;
+}
+
+function grouped(parts: readonly Part[], separator: string): Part[][] {
+  const groups: Part[][] = [[]];
+  for (const part of parts) {
+    groups.at(-1)!.push(part);
+    if (part.separator === separator) groups.push([]);
+  }
+  return groups.filter((group) => group.length > 0);
+}
+
+/** Empty lines are no rows, and a separator at a line's end, as a sheet's copy may leave it, opens no further cell. */
+function rowsOf(parts: readonly Part[], separator: string): Typed[][] {
+  return grouped(parts, separator)
+    .map((row) => row.map(({ text }) => readTyped(text)))
+    .map((row) => (row.at(-1)!.cell === null ? row.slice(0, -1) : row))
+    .filter((row) => row.length > 0);
 }
 
 /** The other way: a cell value as one would type it. */
 export function typedText(cell: unknown): string {
   if (cell === null || cell === undefined) return "";
-  if (Array.isArray(cell)) return cell.map((row) => row.map(typedText).join(", ")).join("\n");
+  if (Array.isArray(cell)) return typedRows(cell, "\n");
   if (typeof cell === "number") return typedNumber(cell);
   if (typeof cell === "boolean") return cell ? "TRUE" : "FALSE";
   const text = String(cell);
   return readTyped(text).cell === text ? text : quoted(text);
+}
+
+/** A range as one would type it, its rows apart as told. */
+export function typedRows(rows: readonly (readonly unknown[])[], between: string): string {
+  const typed = (cell: unknown) =>
+    typeof cell === "string" && (cell === "" || /[,;\t\n"]/.test(cell)) ? quoted(cell) : typedText(cell);
+  return rows.map((row) => row.map(typed).join(", ")).join(between);
 }
 
 const plainNumber = /^([+-]?)(\d+\.?\d*|\.\d+)([eE][+-]?\d+)?\s*(%)?$/;

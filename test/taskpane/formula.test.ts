@@ -45,6 +45,7 @@ describe("a formula carries its literals as typed", () => {
 
   test("further arguments take a line each, and an empty line keeps its place", () => {
     expect(written(cell("A"), further("1e16\n\n3, 4\n"))).toBe('=SHEATH.F("A",1E16,,{3,4})');
+    expect(written(further('1, 2; 3, 4\n"a; b"'))).toBe('=SHEATH.F({1,2;3,4},"a; b")');
   });
 
   test("whatever is typed, a spreadsheet's own lexer reads the arguments back", () => {
@@ -80,5 +81,6 @@ describe("a formula that a sheet would refuse is refused first", () => {
   test("lines of different lengths are no range", () => {
     expect(problem(range("1, 2\n3"))).toMatch(/^x: the lines have different numbers/);
     expect(problem(further("1, 2\n3"))).toBeUndefined();
+    expect(problem(further("1, 2; 3"))).toMatch(/^x: the lines have different numbers/);
   });
 });

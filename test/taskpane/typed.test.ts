@@ -2,7 +2,7 @@ import fc from "fast-check";
 import { expect, test } from "vitest";
 import { catalogue } from "../../functions/catalogue";
 import { argumentsOf, exampleTexts, fieldsOf } from "../../taskpane/pane/fields";
-import { readTyped, typedText } from "../../taskpane/pane/typed";
+import { readTyped, readTypedArguments, readTypedBlock, typedRows, typedText } from "../../taskpane/pane/typed";
 
 test("a typed number is the number a cell would hold", () => {
   expect(readTyped(" 1e16 ").cell).toBe(1e16);
@@ -22,6 +22,22 @@ test("any cell value comes back from how one would type it", () => {
   fc.assert(
     fc.property(value, (cell) => {
       expect(readTyped(typedText(cell)).cell).toBe(Object.is(cell, -0) ? 0 : cell);
+    }),
+    { numRuns: 500 },
+  );
+});
+
+test("any range comes back from how one would type it", () => {
+  const cell = fc.oneof(fc.integer(), fc.string({ unit: fc.constantFrom(...'a",; \t\n1') }));
+  const width = fc.integer({ min: 1, max: 3 });
+  const range = width.chain((n) =>
+    fc.array(fc.array(cell, { minLength: n, maxLength: n }), { minLength: 1, maxLength: 3 }),
+  );
+  fc.assert(
+    fc.property(range, (cells) => {
+      const values = (typed: { cell: unknown }[][]) => typed.map((row) => row.map((each) => each.cell));
+      expect(values(readTypedBlock(typedRows(cells, "\n")))).toEqual(cells);
+      expect(readTypedArguments(`1\n${typedRows(cells, "; ")}`).map(values)).toEqual([[[1]], cells]);
     }),
     { numRuns: 500 },
   );
