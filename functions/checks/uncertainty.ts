@@ -154,7 +154,7 @@ function uncertainArguments({ entry, given, relative, absolute }: Case, values: 
   const found: Uncertain[] = [];
   for (const [index, input] of entry.inputs.slice(0, given.length).entries()) {
     const value = values[index];
-    if (typeof value === "number" && !isBlank(input, given[index])) {
+    if (input.kind === "quantity" && typeof value === "number" && !isBlank(input, given[index])) {
       const stated = { relative: cellAt(relative, index), absolute: cellAt(absolute, index) };
       const u = standardUncertainty(input, value, stated);
       if (typeof u !== "number") return u;

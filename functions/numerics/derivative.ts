@@ -55,18 +55,16 @@ function extrapolate(difference: (h: number) => number, step: number, order: 1 |
       const error = Math.max(Math.abs(next[j] - next[j - 1]), Math.abs(next[j] - row[j - 1]));
       if (!best || error <= best.error) best = { value: next[j], error };
     }
-    // Past the best step rounding only grows.
-    if (best && i > 0 && Math.abs(next[i] - row[i - 1]) > 2 * best.error) break;
     row = next;
   }
   return best;
 }
 
-/** Two slopes that differ by as much over a short step as over a longer one belong to a kink. */
+/** Two slopes that differ nearly as much over a short step as over one eight times as long belong to a kink. */
 function withKink(found: Slope, f: (x: number) => number, x: number, middle: number, step: number): Slope {
   const gap = (h: number) => Math.abs(f(x + h) - 2 * middle + f(x - h)) / h;
-  const near = gap(step / 64);
+  const near = gap(step / 512);
   const size = Math.abs(found.value) + near;
-  const isKink = near > 1e-3 * size && near > 0.5 * gap(step / 8);
+  const isKink = near > 1e-3 * size && near > 0.5 * gap(step / 64);
   return isKink ? { value: found.value, error: Math.max(found.error, near / 2) } : found;
 }
