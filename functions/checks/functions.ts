@@ -14,11 +14,11 @@ export enum UncertaintyMethod {
 }
 
 /**
- * Whether a function may be believed at these inputs: "holds", "marginal", "fails" or "doubtful input", with the reason; the worst verdict for each row.
+ * Whether a function may be believed at these inputs, row by row: the worst of "fails", "doubtful input", "marginal", "holds" and "not tested", in that order, with the reason.
  * @customfunction LIMITCHECK
  * @helpurl https://localhost:3000/taskpane.html#LIMITCHECK
  * @param function_name Name of the function to check, as text.
- * @param inputs The inputs of that function, in its own order, as cells or ranges.
+ * @param inputs The inputs of that function, in its own order, as cells or ranges; the unit of its result changes nothing.
  */
 export function LIMITCHECK(function_name: any[][], ...inputs: any[][][]): any[][] {
   return evaluate(entries.LIMITCHECK, [function_name, ...repeated(inputs)]);

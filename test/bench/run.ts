@@ -2,9 +2,10 @@
 import { mkdirSync, writeFileSync } from "node:fs";
 import os from "node:os";
 import { cells } from "./cells";
+import { checks } from "./checks";
 import type { Row } from "./measure";
 
-const sections: Record<string, () => Row[] | Promise<Row[]>> = { "Coming through cells": cells };
+const sections: Record<string, () => Row[] | Promise<Row[]>> = { "Coming through cells": cells, Checks: checks };
 
 const wanted = process.argv[2]?.toLowerCase();
 const report: Record<string, Row[]> = {};

@@ -59,7 +59,6 @@ export const NOLIMITS = entry("NOLIMITS", {
   compute: (x) => 1 / x,
 });
 
-/** V^a: what relative uncertainties are made for. */
 export const CUBEROOT = entry("CUBEROOT", {
   ...facts,
   inputs: [
@@ -83,6 +82,13 @@ export const SUM4 = entry("SUM4", {
   inputs: ["x1", "x2", "x3", "x4"].map((name) => quantityInput(name, quantities.number)),
   result: quantities.number,
   compute: (...x: number[]) => x.reduce((sum, each) => sum + each, 0),
+});
+
+export const NARROW = entry("NARROW", {
+  ...facts,
+  inputs: [quantityInput("x", quantities.number)],
+  result: quantities.number,
+  compute: (x) => (x > 1 && x < 2 ? x : noSolution("There is a solution between 1 and 2 only")),
 });
 
 export const SHARP = entry("SHARP", {

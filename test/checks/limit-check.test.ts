@@ -96,7 +96,7 @@ describe("columns", () => {
   });
 
   test("ranges that do not match are refused with both shapes", () => {
-    const [[error]] = check(column(1, 2, 3), column(1, 2)) as [[{ message: string }]];
+    const [[error]] = check(column(1, 2, 3), column(1, 2)) as { message: string }[][];
     expect(error.message).toMatch(/2 rows by 1 column does not match n_e of 3 rows by 1 column/);
   });
 

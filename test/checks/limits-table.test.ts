@@ -42,7 +42,7 @@ describe("the table of limits", () => {
   });
 
   test("takes one set of inputs, and points to the function for columns", () => {
-    const [[error]] = limitsTable(directory, "OHMICDROP", [[[1e16], [1e17]], [[3]]]) as [[{ message: string }]];
+    const [[error]] = limitsTable(directory, "OHMICDROP", [[[1e16], [1e17]], [[3]]]) as { message: string }[][];
     expect(error.message).toBe(
       "inputs: LIMITS takes one set of them; give single cells, or use LIMITCHECK for a column.",
     );
