@@ -111,6 +111,7 @@ test("a doubtful input is told at its field", async () => {
   expect(root.querySelector<HTMLElement>("#wallfall-input-n_e-doubt")!.hidden).toBe(true);
   await type("n_e", "1e11");
   expect(root.querySelector("#wallfall-input-n_e-doubt")!.textContent).toMatch(/^doubtful input: .*cm⁻³ meant\?/);
+  expect(all(".result .verdict").join()).toMatch(/doubtful input: n_e$/);
   await type("n_e", "1e11 m^-3");
   expect(root.querySelector<HTMLElement>("#wallfall-input-n_e-doubt")!.hidden).toBe(true);
 });
