@@ -184,7 +184,6 @@ function evaluateTable(entry: Entry<any>, args: readonly unknown[]): Result {
     size,
     odd,
   );
-  const width = isTable(entry.result) ? entry.result.columns.length : 1;
   if (size === 1) {
     if (odd?.[0]) return [[oddResult(inputs, reading, 0)]];
     return finishTable(entry, others!.get(0));
@@ -193,9 +192,11 @@ function evaluateTable(entry: Entry<any>, args: readonly unknown[]): Result {
   for (let i = 0; i < size; i++) {
     const rows = odd?.[i] ? [[oddResult(inputs, reading, i)]] : finishTable(entry, others!.get(i));
     if (rows.length !== 1) return [[toCellError(tableOverRow(entry, shape))]];
-    out.push([...rows[0], ...new Array(width - rows[0].length).fill("")]);
+    out.push(rows[0]);
   }
-  return out;
+  // A spill is a rectangle: a row that ends early, or is one error, is filled with empty text.
+  const width = Math.max(...out.map((row) => row.length));
+  return out.map((row) => (row.length === width ? row : [...row, ...new Array(width - row.length).fill("")]));
 }
 
 /** The inputs of a call with so many arguments: where one repeats, as often as it is given. */
