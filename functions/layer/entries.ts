@@ -6,6 +6,7 @@ import { ionInput, optional, quantityInput, wordInput } from "../cells/inputs";
 import { quantities } from "../cells/quantities";
 import { manyInDebyeSphere } from "../edge/limits";
 import { plasmaFrequency } from "../edge/model";
+import { edgeDebyeLength } from "../edge/twins";
 import { m_e } from "../matter/constants";
 import type { Ion } from "../matter/ion";
 import { DV63, L89J, LL, R91 } from "../sources";
@@ -15,6 +16,7 @@ import * as limits from "./limits";
 import * as model from "./model";
 import { bohmEnd, dropAtEnd } from "./nonlinear-sheath";
 import { sheathProfile } from "./sheath-profile";
+import { drop, fieldAtWall } from "./twins";
 
 const first = { "1.0.0": "first version" };
 const closedForm = "closed form, 4 ulp";
@@ -28,6 +30,14 @@ export const SHEATHWIDTH = entry("SHEATHWIDTH", {
   result: quantities.length,
   compute: width,
   equation: String.raw`s = \begin{cases} \dfrac{\sqrt 2}{3}\,\lambda_D \left(\dfrac{2 V_s}{T_e}\right)^{3/4} & \text{child} \\ \lambda_D \sqrt{\dfrac{2 V_s}{T_e}} & \text{matrix} \\ \lambda_D \displaystyle\int_{\eta_1}^{V_s/T_e} \frac{\mathrm{d}\eta}{\sqrt{2\left(\sqrt{1 + 2\eta} + e^{-\eta} - 2\right)}}, \quad \frac{1}{\sqrt{1 + 2\eta_1}} - e^{-\eta_1} = 0.01 & \text{full} \\ \left[\dfrac{2}{3}\left(\dfrac{5}{3}\right)^{3/2} \dfrac{\varepsilon_0}{e\, n_\mathrm{edge}} \sqrt{\dfrac{2\lambda_i}{\pi T_e}}\; V_s^{3/2}\right]^{2/5} & \text{collisional} \end{cases}`,
+  twin: {
+    steps: [edgeDebyeLength],
+    formula:
+      'IF(model="child",SQRT(2)/3*lambda_D*(2*ABS(V_s)/T_e)^(3/4),IF(model="matrix",lambda_D*SQRT(2*ABS(V_s)/T_e),' +
+      'IF(model="full",NA(),IF(lambda_i="",NA(),' +
+      "(2/3*(5/3)^(3/2)*eps0/(e*n_edge)*SQRT(2*lambda_i/(PI()*T_e))*ABS(V_s)^(3/2))^(2/5)))))",
+    except: { model: ["full"] },
+  },
   limits: [
     limits.electronFree((V_s, _n_edge, T_e, word) => (word === "full" ? undefined : [V_s, T_e])),
     ...limits.pathSuits((V_s, n_edge, T_e, word, lambda_i) => {
@@ -58,6 +68,11 @@ export const CHILDCURRENT = entry("CHILDCURRENT", {
     return lambda_i === undefined ? missingPath() : model.collisionalCurrent(Math.abs(V_s), s, ion, lambda_i);
   },
   equation: String.raw`J = \begin{cases} \dfrac{4}{9}\,\varepsilon_0 \sqrt{\dfrac{2Ze}{M}}\, \dfrac{V_s^{3/2}}{s^2} & \text{collisionless} \\ \dfrac{2}{3}\left(\dfrac{5}{3}\right)^{3/2} \varepsilon_0 \sqrt{\dfrac{2Ze\lambda_i}{\pi M}}\, \dfrac{V_s^{3/2}}{s^{5/2}} & \text{collisional} \end{cases}`,
+  twin: {
+    formula:
+      'IF(model="collisionless",4/9*eps0*SQRT(2*Z*e/M)*ABS(V_s)^(3/2)/s^2,IF(lambda_i="",NA(),' +
+      "2/3*(5/3)^(3/2)*eps0*SQRT(2*Z*e*lambda_i/(PI()*M))*ABS(V_s)^(3/2)/s^(5/2)))",
+  },
   limits: [
     ...limits.pathSuits((_V_s, s, _ion, word, lambda_i) => [word, s, lambda_i]),
     limits.noFieldEmission((V_s, s, _ion, word) => lawField(V_s, s, word)),
@@ -79,6 +94,11 @@ export const CHILDWIDTH = entry("CHILDWIDTH", {
   result: quantities.length,
   compute: widthFor,
   equation: String.raw`s = \begin{cases} \left[\dfrac{4}{9}\,\varepsilon_0 \sqrt{\dfrac{2Ze}{M}}\, \dfrac{V_s^{3/2}}{J}\right]^{1/2} & \text{collisionless} \\ \left[\dfrac{2}{3}\left(\dfrac{5}{3}\right)^{3/2} \varepsilon_0 \sqrt{\dfrac{2Ze\lambda_i}{\pi M}}\, \dfrac{V_s^{3/2}}{J}\right]^{2/5} & \text{collisional} \end{cases}`,
+  twin: {
+    formula:
+      'IF(model="collisionless",SQRT(4/9*eps0*SQRT(2*Z*e/M)*ABS(V_s)^(3/2)/J),IF(lambda_i="",NA(),' +
+      "(2/3*(5/3)^(3/2)*eps0*SQRT(2*Z*e*lambda_i/(PI()*M))*ABS(V_s)^(3/2)/J)^(2/5)))",
+  },
   limits: [
     ...limits.pathSuits((V_s, J, ion, word, lambda_i) => [
       word,
@@ -100,6 +120,7 @@ export const WALLFIELD = entry("WALLFIELD", {
   result: quantities.field,
   compute: (V_s, n_edge, T_e, u_ratio) => model.wallField(Math.abs(V_s), n_edge, T_e, u_ratio),
   equation: String.raw`E = \frac{T_e}{\lambda_D} \sqrt{2\left[\mu^2\left(\sqrt{1 + \frac{2\eta}{\mu^2}} - 1\right) + e^{-\eta} - 1\right]}, \qquad \eta = \frac{V_s}{T_e}, \quad \mu = \frac{u_0}{u_B}`,
+  twin: { steps: [edgeDebyeLength, drop, fieldAtWall], formula: "E" },
   limits: [
     limits.noFieldEmission((V_s, n_edge, T_e, u_ratio) => model.wallField(Math.abs(V_s), n_edge, T_e, u_ratio)),
     inDebyeSphere,
@@ -115,6 +136,7 @@ export const SHEATHPOTENTIAL = entry("SHEATHPOTENTIAL", {
   result: quantities.voltage,
   compute: (x, V_s, n_edge, T_e, u_ratio) => model.sheathPotential(x, Math.abs(V_s), n_edge, T_e, u_ratio),
   equation: String.raw`x = \lambda_D \int_{-\varphi/T_e}^{V_s/T_e} \frac{\mathrm{d}\eta}{\sqrt{2\left[\mu^2\left(\sqrt{1 + 2\eta/\mu^2} - 1\right) + e^{-\eta} - 1\right]}}`,
+  twin: "the distance is an integral over the potential, and its inverse takes iteration",
   limits: [
     limits.insideSheath((x, V_s, n_edge, T_e, u_ratio) => [x, V_s, n_edge, T_e, u_ratio]),
     manyInDebyeSphere((_x, _V_s, n_edge, T_e) => [n_edge, T_e]),
@@ -152,6 +174,7 @@ export const SHEATHPROFILE = entry("SHEATHPROFILE", {
     return titled(header, profileColumns, rows);
   },
   equation: String.raw`\lambda_D^2\,\frac{\mathrm{d}^2\eta}{\mathrm{d}x^2} = \left(1 + \frac{2\eta}{\mu^2}\right)^{-1/2} - e^{-\eta}, \qquad \eta = -\frac{\varphi}{T_e}, \quad \mu = \frac{u_0}{u_B}`,
+  twin: "the distance is an integral over the potential",
   limits: [
     limits.noFieldEmission((V_s, n_edge, T_e, u_ratio) => model.wallField(Math.abs(V_s), n_edge, T_e, u_ratio)),
     inDebyeSphere,
@@ -167,6 +190,7 @@ export const IONTRANSITTIME = entry("IONTRANSITTIME", {
   result: quantities.time,
   compute: (V_s, s, ion) => model.ionTransitTime(Math.abs(V_s), s, ion),
   equation: String.raw`\tau_i = 3 s \sqrt{\frac{M}{2 Z e V_s}}`,
+  twin: { formula: "3*s*SQRT(M/(2*Z*e*ABS(V_s)))" },
   sources: [LL],
   changes: first,
   example: [300, 1e-3, "Ar+"],
@@ -178,6 +202,10 @@ export const SHEATHCAPACITANCE = entry("SHEATHCAPACITANCE", {
   result: quantities.capacitance,
   compute: (V_s, n_edge, T_e, u_ratio) => model.sheathCapacitance(Math.abs(V_s), n_edge, T_e, u_ratio),
   equation: String.raw`C = \frac{\mathrm{d}(\varepsilon_0 E)}{\mathrm{d}V_s} = \frac{e\, n_\mathrm{edge}}{E} \left[\left(1 + \frac{2\eta}{\mu^2}\right)^{-1/2} - e^{-\eta}\right]`,
+  twin: {
+    steps: [edgeDebyeLength, drop, fieldAtWall],
+    formula: "e*n_edge/E*(1/SQRT(1+2*eta/u_ratio^2)-EXP(-eta))",
+  },
   limits: [inDebyeSphere],
   sources: [R91],
   changes: first,
@@ -190,6 +218,15 @@ export const PULSEDWIDTH = entry("PULSEDWIDTH", {
   result: quantities.length,
   compute: (V_s, n_edge, T_e, ion, t) => model.pulsedWidth(Math.abs(V_s), n_edge, T_e, ion, t),
   equation: String.raw`s = s_0 \left(1 + \tfrac{2}{3}\,\omega_{pi} t\right)^{1/3} \le s_\mathrm{Child}, \qquad s_0 = \lambda_D \sqrt{\frac{2 V_s}{T_e}}`,
+  twin: {
+    steps: [
+      edgeDebyeLength,
+      { name: "s_0", unit: "m", formula: "lambda_D*SQRT(2*ABS(V_s)/T_e)" },
+      { name: "s_Child", unit: "m", formula: "SQRT(2)/3*lambda_D*(2*ABS(V_s)/T_e)^(3/4)" },
+      { name: "omega_pi", unit: "rad/s", formula: "SQRT(Z*e^2*n_edge/(eps0*M))" },
+    ],
+    formula: "MAX(s_0,MIN(s_0*(1+2/3*omega_pi*t)^(1/3),s_Child))",
+  },
   limits: [
     limits.electronFree((V_s, _n_edge, T_e) => [V_s, T_e]),
     limits.electronsHaveLeft((_V_s, n_edge, _T_e, _ion, t) => 2 * Math.PI * plasmaFrequency(n_edge, m_e, 1) * t),
@@ -218,6 +255,7 @@ export const IMPACTDISTRIBUTION = entry("IMPACTDISTRIBUTION", {
     return titled(header, impactColumns, [...rows, [V, 0, primaries(s, lambda_i)]]);
   },
   equation: String.raw`f(E) = \frac{s}{2 V_s \lambda_i} \left(1 - \frac{E}{V_s}\right)^{-1/2} \exp\!\left[-\frac{s}{\lambda_i}\left(1 - \sqrt{1 - \frac{E}{V_s}}\right)\right] + e^{-s/\lambda_i}\, \delta(E - V_s)`,
+  twin: "it is a curve of as many points as are asked for",
   limits: [limits.fieldOutrunsGas((V_s, s, lambda_i) => [V_s, s, lambda_i])],
   sources: [DV63],
   changes: first,

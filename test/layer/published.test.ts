@@ -99,6 +99,7 @@ describe("the edge of the nonlinear sheath", () => {
     const off = (x: number) => Math.abs((dropAt(x, 100, 1) * x * x) / 6 - 1);
     expect(off(1e4)).toBeLessThan(1e-2);
     expect(off(1e8)).toBeLessThan(1e-6);
+    expect(off(1e14)).toBeLessThan(1e-11);
   });
 
   test("above it, as an exponential with the decay length λ_D/√(1 − (u_B/u_0)²)", () => {

@@ -2,6 +2,7 @@ import { createRequire } from "node:module";
 import { describe, expect, test } from "vitest";
 import { debyeLength } from "../../functions/edge/model";
 import { SHEATHPROFILE } from "../../functions/layer/functions";
+import { fullWidth } from "../../functions/layer/model";
 import { sheathProfile, type ProfilePoint } from "../../functions/layer/sheath-profile";
 
 /** Taken untyped: the package ships its TypeScript source, which does not pass the checks of this project. */
@@ -89,6 +90,13 @@ function worstAgainstSolver(
   }
   return worst;
 }
+
+test("at the Bohm speed its last row stands at the full width, in steps large or small", () => {
+  for (const points of [2, 20, 2000]) {
+    const { x } = sheathProfile(300, 1e16, 3, 1, points).at(-1)!;
+    expect(x / fullWidth(300, 1e16, 3)).toBeCloseTo(1, 12);
+  }
+});
 
 test("a finer profile passes through the points of a coarser one", () => {
   const coarse = sheathProfile(300, 1e16, 3, 1, 11);
