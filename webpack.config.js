@@ -22,6 +22,7 @@ const frontDoors = () =>
     .filter((file) => existsSync(file));
 
 const freeze = at("manifest/build/freeze-loader.js");
+const leaveOut = at("manifest/build/leave-out-loader.js");
 
 /** Shared by all bundles; each is a configuration of its own, so that none leaks into another. */
 const common = (origin) => ({
@@ -73,16 +74,16 @@ export default (env = {}) => {
   };
   const styled = (name, folder) =>
     bundle(name, `${folder}/index.ts`, new MiniCssExtractPlugin({ filename: "[name].css" }));
-  const bundles = [
-    bundle(
-      "functions",
-      "functions/register.ts",
-      new FunctionsJsonPlugin({ files: frontDoors, origin }),
-      new SizePlugin({ asset: "functions.js", limit: 60 * 1024 }),
-    ),
-    styled("taskpane", "taskpane"),
-    styled("trial", "taskpane/trial"),
-  ].filter(({ entry }) => Object.values(entry).every((file) => existsSync(file)));
+  const functions = bundle(
+    "functions",
+    "functions/register.ts",
+    new FunctionsJsonPlugin({ files: frontDoors, origin }),
+    new SizePlugin({ asset: "functions.js", limit: 60 * 1024 }),
+  );
+  functions.module.rules.push({ test: /entries\.ts$/, enforce: "pre", loader: leaveOut });
+  const bundles = [functions, styled("taskpane", "taskpane"), styled("trial", "taskpane/trial")].filter(({ entry }) =>
+    Object.values(entry).every((file) => existsSync(file)),
+  );
 
   /** Pages are written by hand and copied as they stand. */
   const page = (from, transform) => ({ from: at(from), to: "[name][ext]", transform });

@@ -3,6 +3,7 @@ import type { Fault } from "./fault";
 import type { CellError } from "./host";
 import type { Input } from "./inputs";
 import type { Quantity } from "./quantities";
+import type { Twin } from "./twin";
 
 /** What a cell of a result may hold before it goes to the host. */
 export type Value = number | string | boolean;
@@ -46,6 +47,8 @@ export interface Facts<I extends readonly Input<any>[]> {
   compute: (...values: ValuesOf<I>) => number | string | (Value | CellError)[][] | Fault;
   /** The equation for display, TeX. */
   equation: string;
+  /** The function as plain spreadsheet arithmetic, or why there is none. */
+  twin?: Twin | string;
   limits?: readonly Limit<ValuesOf<I>>[];
   sources: readonly Source[];
   /** What each version changed in what this function returns. */

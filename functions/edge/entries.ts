@@ -10,6 +10,7 @@ import { LL, NRL, R91 } from "../sources";
 import { crossSections } from "./cross-sections";
 import { coldIons, manyInDebyeSphere } from "./limits";
 import * as model from "./model";
+import { coldBohmSpeed, edgeDebyeLength } from "./twins";
 
 const first = { "1.0.0": "first version" };
 const closedForm = "closed form, 4 ulp";
@@ -25,6 +26,7 @@ export const WALLTOEDGE = entry("WALLTOEDGE", {
   result: quantities.voltage,
   compute: model.wallToEdge,
   equation: String.raw`V_w = V_\mathrm{wall} - V_\mathrm{plasma} - T_e \ln\frac{n_\mathrm{edge}}{n_\mathrm{bulk}}`,
+  twin: { formula: "V_wall-V_plasma-T_e*LN(edge_ratio)" },
   limits: [
     {
       assumption: "the wall repels electrons",
@@ -48,6 +50,11 @@ export const DEBYELENGTH = entry("DEBYELENGTH", {
   result: quantities.length,
   compute: (n_e, T_e, T_i) => model.debyeLengthWithIons(n_e, T_e, T_i ?? 0),
   equation: String.raw`\lambda_D = \sqrt{\frac{\varepsilon_0 T_e}{e\, n_e}}, \qquad \frac{1}{\lambda^2} = \frac{1}{\lambda_{D}^2} + \frac{e\, n_e}{\varepsilon_0 T_i}`,
+  twin: {
+    blanks: { T_i: 0 },
+    steps: [{ name: "lambda_e", unit: "m", formula: "SQRT(eps0*T_e/(e*n_e))" }],
+    formula: "IF(T_i>0,1/SQRT(1/lambda_e^2+e*n_e/(eps0*T_i)),lambda_e)",
+  },
   limits: [manyInDebyeSphere((n_e, T_e) => [n_e, T_e])],
   sources: [NRL],
   changes: first,
@@ -60,6 +67,7 @@ export const PLASMAFREQUENCY = entry("PLASMAFREQUENCY", {
   result: quantities.anyFrequency,
   compute: (n, ion) => model.plasmaFrequency(n, ion.mass, ion.charge),
   equation: String.raw`f_p = \frac{1}{2\pi}\sqrt{\frac{n q^2}{\varepsilon_0 m}}`,
+  twin: { formula: "SQRT(n*(Z*e)^2/(eps0*M))/(2*PI())" },
   sources: [NRL],
   changes: first,
   example: [1e16],
@@ -75,6 +83,7 @@ export const MEANFREEPATH = entry("MEANFREEPATH", {
   result: quantities.length,
   compute: model.meanFreePath,
   equation: String.raw`\lambda_i = \frac{k_B T_g}{p\, \sigma}`,
+  twin: { formula: "k_B*T_g/(p*sigma)" },
   sources: [LL],
   changes: first,
   example: [0.7, "Ar"],
@@ -86,6 +95,7 @@ export const BOHMSPEED = entry("BOHMSPEED", {
   result: quantities.speed,
   compute: (T_e, ion, T_i, gamma_i) => model.bohmSpeed(T_e, ion, T_i ?? 0, gamma_i),
   equation: String.raw`u_B = \sqrt{\frac{e\,(Z T_e + \gamma_i T_i)}{M}}`,
+  twin: { blanks: { T_i: 0 }, formula: "SQRT(e*(Z*T_e+gamma_i*T_i)/M)" },
   limits: [coldIons((_T_e, _ion, T_i) => T_i)],
   sources: [R91],
   changes: first,
@@ -98,6 +108,7 @@ export const COLLISIONALBOHMSPEED = entry("COLLISIONALBOHMSPEED", {
   result: quantities.speed,
   compute: model.collisionalBohmSpeed,
   equation: String.raw`u_s = u_B \left(1 + \frac{\pi \lambda_D}{2 \lambda_i}\right)^{-1/2}`,
+  twin: { steps: [coldBohmSpeed, edgeDebyeLength], formula: "u_B/SQRT(1+PI()*lambda_D/(2*lambda_i))" },
   limits: [
     {
       assumption: "ions drift much faster than the gas moves (gas at 300 K)",
@@ -121,6 +132,7 @@ export const BOHMRATIO = entry("BOHMRATIO", {
   result: quantities.number,
   compute: (u_0, T_e, ion, T_i, gamma_i) => u_0 / model.bohmSpeed(T_e, ion, T_i ?? 0, gamma_i),
   equation: String.raw`\frac{u_0}{u_B} \ge 1`,
+  twin: { blanks: { T_i: 0 }, formula: "u_0/SQRT(e*(Z*T_e+gamma_i*T_i)/M)" },
   limits: [
     {
       assumption: "ions enter at the Bohm speed or faster",
@@ -157,6 +169,10 @@ export const EDGEDECAYLENGTH = entry("EDGEDECAYLENGTH", {
     return model.edgeDecayLength(n_edge, T_e, ion, u_0);
   },
   equation: String.raw`\ell = \frac{\lambda_D}{\sqrt{1 - (u_B/u_0)^2}}`,
+  twin: {
+    steps: [coldBohmSpeed, edgeDebyeLength],
+    formula: "IF(u_0>u_B,lambda_D/SQRT(1-(u_B/u_0)^2),NA())",
+  },
   limits: [manyInDebyeSphere((n_edge, T_e) => [n_edge, T_e])],
   sources: [R91],
   changes: first,
@@ -180,6 +196,17 @@ export const EDGERATIO = entry("EDGERATIO", {
     return model.edgeRatio(shape, size ?? 1, lambda_i);
   },
   equation: String.raw`\frac{n_\mathrm{edge}}{n_\mathrm{bulk}} = \begin{cases} e^{-1/2} & \text{free} \\ 0.86\,\left(3 + \dfrac{l}{2\lambda_i}\right)^{-1/2} & \text{slab} \\ 0.80\,\left(4 + \dfrac{R}{\lambda_i}\right)^{-1/2} & \text{cylinder} \end{cases}`,
+  twin: {
+    // No mean free path is no collision; a size is only wanted where ions collide.
+    steps: [
+      {
+        name: "paths",
+        unit: "",
+        formula: 'IF(lambda_i="",0,IF(shape="free",0,IF(size="",NA(),size/lambda_i)))',
+      },
+    ],
+    formula: 'IF(shape="free",EXP(-1/2),IF(shape="slab",0.86/SQRT(3+paths/2),0.8/SQRT(4+paths)))',
+  },
   limits: [
     {
       // LL ask λ_i/size ≥ T_i/T_e; without temperatures the usual 0.01 to 0.03 of low-pressure discharges stands in.
@@ -204,6 +231,7 @@ export const PRESHEATHDROP = entry("PRESHEATHDROP", {
   result: quantities.voltage,
   compute: model.presheathDrop,
   equation: String.raw`\Delta V = -T_e \ln\frac{n_\mathrm{edge}}{n_\mathrm{bulk}}`,
+  twin: { formula: "-T_e*LN(edge_ratio)" },
   sources: [LL],
   changes: first,
   example: [3],

@@ -10,6 +10,7 @@ import { BHC09, R95 } from "../sources";
 import { fractions, ions, readMix } from "./inputs";
 import { ruleSuitsMixture } from "./limits";
 import * as model from "./model";
+import { speedOfOne, speedTogether } from "./twins";
 
 const first = { "1.0.0": "first version" };
 const closedForm = "closed form, 4 ulp";
@@ -33,6 +34,10 @@ export const IONMIXSPEEDS = entry("IONMIXSPEEDS", {
     });
   },
   equation: String.raw`u_j = \begin{cases} \sqrt{\sum_k f_k Z_k^2\, \dfrac{e T_e}{M_k}} & \text{common} \\ \sqrt{\dfrac{Z_j e T_e}{M_j}} & \text{own} \end{cases} \qquad \sum_j \frac{f_j Z_j^2\, e T_e}{M_j u_j^2} = 1, \quad \sum_j Z_j f_j = 1`,
+  twin: {
+    steps: [speedTogether],
+    formula: { speed: speedOfOne, "speed/u_B": `${speedOfOne}/SQRT(Z*e*T_e/M)` },
+  },
   limits: ruleSuitsMixture((_T_e, ions, fractions, rule) => [readMix(ions, fractions), rule]),
   sources: [R95, BHC09],
   changes: first,
@@ -58,6 +63,13 @@ export const IONMIXFLUXES = entry("IONMIXFLUXES", {
     });
   },
   equation: String.raw`\Gamma_j = f_j\, n_\mathrm{edge}\, u_j, \qquad J_j = Z_j e\, \Gamma_j`,
+  twin: {
+    steps: [speedTogether],
+    formula: {
+      flux: `fractions*edge_ratio*n_bulk*${speedOfOne}`,
+      current_density: `Z*e*fractions*edge_ratio*n_bulk*${speedOfOne}`,
+    },
+  },
   limits: [
     ...ruleSuitsMixture((_n, _T_e, ions, fractions, rule) => [readMix(ions, fractions), rule]),
     manyInDebyeSphere((n_bulk, T_e, _ions, _fractions, _rule, edge_ratio) => [edge_ratio * n_bulk, T_e]),

@@ -4,6 +4,7 @@ import { badInput, noSolution } from "../cells/fault";
 import { ionInput, optional, quantityInput } from "../cells/inputs";
 import { quantities } from "../cells/quantities";
 import { coldIons } from "../edge/limits";
+import { warmBohmSpeed } from "../edge/twins";
 import { electron } from "../matter/ion";
 import { C82, NRL, S00, S12 } from "../sources";
 import { aboveGrazing } from "../wall/limits";
@@ -20,6 +21,7 @@ export const GYRORADIUS = entry("GYRORADIUS", {
   result: quantities.length,
   compute: model.gyroradius,
   equation: String.raw`\rho = \frac{\sqrt{e\,T M}}{Z e B}`,
+  twin: { formula: "SQRT(e*T*M)/(Z*e*B)" },
   limits: [slowParticles((T, _B, ion) => [T, ion])],
   sources: [NRL],
   changes: first,
@@ -32,6 +34,12 @@ export const MAGNETICPRESHEATHWIDTH = entry("MAGNETICPRESHEATHWIDTH", {
   result: quantities.length,
   compute: (T_e, ion, B, angle, T_i) => model.magneticPresheathWidth(T_e, ion, B, angle, T_i ?? 0),
   equation: String.raw`L = \sqrt{6}\, \frac{u_B}{\omega_{ci}} \cos\theta, \qquad \omega_{ci} = \frac{Z e B}{M}`,
+  twin: {
+    blanks: { T_i: 0 },
+    steps: [warmBohmSpeed, { name: "omega_ci", unit: "rad/s", formula: "Z*e*B/M" }],
+    // cos(angle), which stays exactly 0 at the normal.
+    formula: "SQRT(6)*u_B/omega_ci*SIN(RADIANS(90-angle))",
+  },
   limits: [
     aboveGrazing((T_e, ion, _B, angle, T_i) => ({ angle, T_e, ion, T_i })),
     coldIons((_T_e, _ion, _B, _angle, T_i) => T_i),
@@ -47,6 +55,7 @@ export const MAGNETICPRESHEATHDROP = entry("MAGNETICPRESHEATHDROP", {
   result: quantities.voltage,
   compute: model.magneticPresheathDrop,
   equation: String.raw`\Delta V = -T_e \ln \sin\theta`,
+  twin: { formula: "-T_e*LN(SIN(RADIANS(angle)))" },
   limits: [withinFloatingDrop((T_e, angle) => model.magneticPresheathDrop(T_e, angle) / T_e)],
   sources: [S00],
   changes: first,
@@ -73,6 +82,10 @@ export const GRAZINGLIMIT = entry("GRAZINGLIMIT", {
       : angle;
   },
   equation: String.raw`\theta_g = \arcsin\sqrt{2\pi \frac{m}{M}\left(Z + \frac{T_i}{T_e}\right)}`,
+  twin: {
+    blanks: { T_i: 0 },
+    formula: 'DEGREES(ASIN(SQRT(2*PI()*m_e/M*(Z+IF(T_e="",0,T_i/T_e)))))',
+  },
   limits: [coldIons((_ion, _T_e, T_i) => T_i)],
   sources: [S12],
   changes: first,

@@ -5,11 +5,13 @@ import { format } from "../cells/format";
 import { ionInput, quantityInput } from "../cells/inputs";
 import { quantities } from "../cells/quantities";
 import { manyInDebyeSphere } from "../edge/limits";
+import { electronSpeed } from "../edge/twins";
 import type { Ion } from "../matter/ion";
 import { BT59, LL } from "../sources";
 import { bodyRatio, negativeIonEdges } from "./edges";
 import { negativeIonsTurnBack, oneEdge } from "./limits";
 import * as model from "./model";
+import { electronegativeBohmSpeed } from "./twins";
 
 const first = { "1.0.0": "first version" };
 const closedForm = "closed form, 4 ulp";
@@ -31,6 +33,7 @@ export const NEGATIVEIONBOHMSPEED = entry("NEGATIVEIONBOHMSPEED", {
   result: quantities.speed,
   compute: model.negativeIonBohmSpeed,
   equation: String.raw`u = \sqrt{\frac{Z e T_e}{M}\, \frac{1 + \alpha_s}{1 + \alpha_s \gamma}}, \qquad \gamma = \frac{T_e}{T_-}`,
+  twin: { steps: [electronegativeBohmSpeed], formula: "u" },
   limits: [oneEdge((_T_e, _ion, alpha_s, gamma) => [bodyRatio(alpha_s, gamma), gamma])],
   sources: [BT59],
   changes: first,
@@ -54,6 +57,7 @@ export const NEGATIVEIONEDGE = entry("NEGATIVEIONEDGE", {
       return [alpha_s, drop, Math.exp(-drop), Math.sqrt(2 * drop)];
     }),
   equation: String.raw`\alpha_b = \alpha_s \exp\!\left[\frac{(1 + \alpha_s)(\gamma - 1)}{2 (1 + \alpha_s \gamma)}\right], \qquad \frac{\Delta V}{T_e} = \frac{1 + \alpha_s}{2 (1 + \alpha_s \gamma)}`,
+  twin: "alpha_s is a root that takes iteration, and there may be three",
   limits: [oneEdge((alpha_b, gamma) => [alpha_b, gamma])],
   sources: [BT59, LL],
   changes: first,
@@ -66,6 +70,7 @@ export const NEGATIVEIONFLUX = entry("NEGATIVEIONFLUX", {
   result: quantities.flux,
   compute: model.negativeIonFlux,
   equation: String.raw`\Gamma_+ = n_\mathrm{edge} (1 + \alpha_s) \frac{u}{Z}`,
+  twin: { steps: [electronegativeBohmSpeed], formula: "n_edge*(1+alpha_s)*u/Z" },
   limits: [
     oneEdge((_n, _T_e, _ion, alpha_s, gamma) => [bodyRatio(alpha_s, gamma), gamma]),
     manyInDebyeSphere((n_edge, T_e) => [n_edge, T_e]),
@@ -81,6 +86,10 @@ export const NEGATIVEIONPOTENTIAL = entry("NEGATIVEIONPOTENTIAL", {
   result: quantities.voltage,
   compute: floating,
   equation: String.raw`V_f = -T_e \ln\frac{\bar v_e}{4 (1 + \alpha_s) u}`,
+  twin: {
+    steps: [electronegativeBohmSpeed, electronSpeed, { name: "excess", unit: "", formula: "v_e/(4*(1+alpha_s)*u)" }],
+    formula: "IF(excess>1,-T_e*LN(excess),NA())",
+  },
   limits: [
     negativeIonsTurnBack((T_e, ion, alpha_s, gamma) => {
       const V_f = floating(T_e, ion, alpha_s, gamma);

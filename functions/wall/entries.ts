@@ -6,6 +6,7 @@ import { ionInput, optional, quantityInput, quantityOrWord, wordInput } from "..
 import { quantities } from "../cells/quantities";
 import { coldIons, manyInDebyeSphere } from "../edge/limits";
 import { presheathDrop } from "../edge/model";
+import { edgeDensity, electronSpeed, warmBohmSpeed } from "../edge/twins";
 import { e, eps0, k_B } from "../matter/constants";
 import type { Ion } from "../matter/ion";
 import { CP, D23, HW67, LL, S00, S54 } from "../sources";
@@ -24,6 +25,7 @@ import {
 } from "./limits";
 import * as model from "./model";
 import { floatingOrWhyNot, repellingOrWhyNot, voltageOrWhyNot } from "./potentials";
+import { spaceChargeLimit, wallPotential } from "./twins";
 
 const first = { "1.0.0": "first version" };
 const closedForm = "closed form, 4 ulp";
@@ -47,6 +49,12 @@ export const FLOATINGPOTENTIAL = entry("FLOATINGPOTENTIAL", {
     return from === "edge" || V_f instanceof Fault ? V_f : V_f - presheathDrop(T_e, edge_ratio);
   },
   equation: String.raw`V_f = -T_e \ln\frac{(1-\delta_e)\,\bar v_e}{4 u_B} \;\left[\, + T_e \ln\frac{n_\mathrm{edge}}{n_\mathrm{bulk}} \text{ from the plasma}\right]`,
+  twin: {
+    blanks: { T_i: 0, delta_e: 0 },
+    steps: [warmBohmSpeed, electronSpeed, { name: "V_f", unit: "V", formula: "-T_e*LN((1-delta_e)*v_e/(4*u_B))" }],
+    formula: 'IF(V_f<0,IF(from="plasma",V_f+T_e*LN(edge_ratio),V_f),NA())',
+    untested: spaceChargeLimit,
+  },
   limits: sheathLimits((T_e, ion, T_i, delta_e) => ({
     V_w: floatingOrWhyNot(T_e, ion, T_i, delta_e),
     T_e,
@@ -66,6 +74,11 @@ export const WALLFLUX = entry("WALLFLUX", {
   compute: (n_bulk, T_e, ion, T_i, edge_ratio, angle) =>
     model.ionFlux(edge_ratio * n_bulk, T_e, ion, T_i ?? 0, angle ?? 90),
   equation: String.raw`\Gamma_i = \frac{n_\mathrm{edge}}{n_\mathrm{bulk}}\, n_\mathrm{bulk}\, \frac{u_B}{Z} \sin\theta`,
+  twin: {
+    blanks: { T_i: 0, angle: 90 },
+    steps: [warmBohmSpeed],
+    formula: "edge_ratio*n_bulk*u_B/Z*SIN(RADIANS(angle))",
+  },
   limits: [
     aboveGrazing((_n, T_e, ion, T_i, _ratio, angle) => ({ angle, T_e, ion, T_i })),
     coldIons((_n, _T_e, _ion, T_i) => T_i),
@@ -83,6 +96,11 @@ export const IONCURRENTDENSITY = entry("IONCURRENTDENSITY", {
   compute: (n_bulk, T_e, ion, T_i, edge_ratio, angle) =>
     model.ionCurrentDensity(edge_ratio * n_bulk, T_e, ion, T_i ?? 0, angle ?? 90),
   equation: String.raw`J_i = Z e\, \Gamma_i = e\, n_\mathrm{edge}\, u_B \sin\theta`,
+  twin: {
+    blanks: { T_i: 0, angle: 90 },
+    steps: [warmBohmSpeed],
+    formula: "e*edge_ratio*n_bulk*u_B*SIN(RADIANS(angle))",
+  },
   limits: WALLFLUX.limits,
   sources: [LL, S00],
   changes: first,
@@ -95,6 +113,7 @@ export const ELECTRONFLUX = entry("ELECTRONFLUX", {
   result: quantities.flux,
   compute: (n_bulk, T_e, V_w, edge_ratio) => model.electronFlux(edge_ratio * n_bulk, T_e, V_w),
   equation: String.raw`\Gamma_e = \tfrac14\, n_\mathrm{edge}\, \bar v_e\, e^{V_w/T_e}, \qquad \bar v_e = \sqrt{\frac{8 e T_e}{\pi m}}`,
+  twin: { steps: [electronSpeed], formula: "edge_ratio*n_bulk*v_e/4*EXP(MIN(V_w,0)/T_e)" },
   limits: [
     wallRepels((_n, T_e, V_w) => ({ V_w, T_e })),
     manyInDebyeSphere((n_bulk, T_e, _V_w, edge_ratio) => [edge_ratio * n_bulk, T_e]),
@@ -111,6 +130,11 @@ export const WALLCURRENT = entry("WALLCURRENT", {
   compute: (V_w, n_bulk, T_e, ion, T_i, edge_ratio, delta_e) =>
     model.wallCurrent(V_w, edge_ratio * n_bulk, T_e, ion, T_i ?? 0, delta_e ?? 0),
   equation: String.raw`J = e\, n_\mathrm{edge} \left[ u_B - (1-\delta_e)\, \tfrac14 \bar v_e\, e^{V_w/T_e} \right]`,
+  twin: {
+    blanks: { T_i: 0, delta_e: 0 },
+    steps: [warmBohmSpeed, electronSpeed, { name: "kept", unit: "", formula: "IF(V_w<0,1-delta_e,1)" }],
+    formula: "e*edge_ratio*n_bulk*(u_B-kept*v_e/4*EXP(MIN(V_w,0)/T_e))",
+  },
   limits: [
     ...sheathLimits((V_w, _n, T_e, ion, T_i, _ratio, delta_e) => ({ V_w, T_e, ion, T_i, delta_e })),
     weakIonEmissionFromMetal((_V_w, _n, _T_e, ion) => ion),
@@ -128,6 +152,18 @@ export const WALLVOLTAGE = entry("WALLVOLTAGE", {
   compute: (J, n_bulk, T_e, ion, T_i, edge_ratio, delta_e) =>
     voltageOrWhyNot(J, edge_ratio * n_bulk, T_e, ion, T_i, delta_e),
   equation: String.raw`V_w = T_e \ln\frac{e\, n_\mathrm{edge}\, u_B - J}{(1-\delta_e)\, \tfrac14 e\, n_\mathrm{edge}\, \bar v_e} \le 0`,
+  twin: {
+    blanks: { T_i: 0, delta_e: 0 },
+    steps: [
+      edgeDensity,
+      warmBohmSpeed,
+      electronSpeed,
+      { name: "J_e", unit: "A/m^2", formula: "e*n_edge*u_B-J" },
+      { name: "J_e0", unit: "A/m^2", formula: "(1-delta_e)*e*n_edge*v_e/4" },
+    ],
+    formula: "IF(J_e>0,IF(J_e<=J_e0,T_e*LN(J_e/J_e0),NA()),NA())",
+    untested: spaceChargeLimit,
+  },
   limits: [
     ...sheathLimits((J, n_bulk, T_e, ion, T_i, edge_ratio, delta_e) => ({
       V_w: voltageOrWhyNot(J, edge_ratio * n_bulk, T_e, ion, T_i, delta_e),
@@ -153,6 +189,15 @@ export const IONIMPACTENERGY = entry("IONIMPACTENERGY", {
     return voltage instanceof Fault ? voltage : model.impactEnergy(T_e, ion, T_i ?? 0, voltage);
   },
   equation: String.raw`E_i = -Z V_w + \frac{M u_B^2}{2e} = -Z V_w + \tfrac12 (Z T_e + T_i)`,
+  twin: {
+    blanks: { T_i: 0 },
+    steps: [
+      warmBohmSpeed,
+      electronSpeed,
+      { name: "V", unit: "V", formula: 'IF(V_w="floating",-T_e*LN(v_e/(4*u_B)),V_w)' },
+    ],
+    formula: "IF(V>0,NA(),-Z*V+M*u_B^2/(2*e))",
+  },
   limits: [
     wallRepels((T_e, ion, T_i, V_w) => ({ V_w: repellingOrWhyNot(V_w, T_e, ion, T_i), T_e })),
     // Only where it floats do electrons have a say in what the ions gain.
@@ -189,6 +234,23 @@ export const WALLHEATFLUX = entry("WALLHEATFLUX", {
     return e * model.ionFlux(edge_ratio * n_bulk, T_e, ion, T_i ?? 0, angle ?? 90) * (perIon + surface_energy);
   },
   equation: String.raw`q = e\,\Gamma_i \left[ -Z V_w + \frac{M u_B^2}{2e} + \tfrac52 T_i + E_\mathrm{surface} \right] + 2 e T_e\, \Gamma_e, \qquad \Gamma_e = \frac{Z\,\Gamma_i}{1-\delta_e} \text{ floating}`,
+  twin: {
+    blanks: { T_i: 0, delta_e: 0, angle: 90 },
+    steps: [
+      edgeDensity,
+      warmBohmSpeed,
+      electronSpeed,
+      wallPotential,
+      { name: "Gamma_i", unit: "m^-2 s^-1", formula: "n_edge*u_B/Z*SIN(RADIANS(angle))" },
+      {
+        name: "Gamma_e",
+        unit: "m^-2 s^-1",
+        formula: 'IF(V_w="floating",Z*Gamma_i/(1-delta_e),n_edge*v_e/4*EXP(V/T_e)*SIN(RADIANS(angle)))',
+      },
+    ],
+    formula: "IF(V>0,NA(),e*Gamma_i*(-Z*V+M*u_B^2/(2*e)+5/2*T_i+surface_energy)+2*e*T_e*Gamma_e)",
+    untested: spaceChargeLimit,
+  },
   limits: [
     ...sheathLimits((_n, T_e, ion, T_i, V_w, _ratio, delta_e) => atWall(V_w, T_e, ion, T_i, delta_e)),
     aboveGrazing((_n, T_e, ion, T_i, _V_w, _ratio, _delta, _surface, angle) => ({ angle, T_e, ion, T_i })),
@@ -208,6 +270,21 @@ export const HEATFACTOR = entry("HEATFACTOR", {
     return perIon instanceof Fault ? perIon : perIon / T_e;
   },
   equation: String.raw`\gamma = \frac{q}{e T_e \Gamma_i} = \frac{-Z V_w + M u_B^2/2e + \tfrac52 T_i}{T_e} + 2\,\frac{\Gamma_e}{\Gamma_i}`,
+  twin: {
+    blanks: { T_i: 0, delta_e: 0 },
+    steps: [
+      warmBohmSpeed,
+      electronSpeed,
+      wallPotential,
+      {
+        name: "electrons_per_ion",
+        unit: "",
+        formula: 'IF(V_w="floating",Z/(1-delta_e),Z*v_e/(4*u_B)*EXP(V/T_e))',
+      },
+    ],
+    formula: "IF(V>0,NA(),(-Z*V+M*u_B^2/(2*e)+5/2*T_i)/T_e+2*electrons_per_ion)",
+    untested: spaceChargeLimit,
+  },
   limits: sheathLimits((T_e, ion, T_i, V_w, delta_e) => atWall(V_w, T_e, ion, T_i, delta_e)),
   sources: [S00],
   changes: first,
@@ -230,6 +307,7 @@ export const EMISSIONLIMIT = entry("EMISSIONLIMIT", {
     return [[limit.delta, limit.drop, limit.edgeEnergy]];
   },
   equation: String.raw`a + s = 1, \quad a - \frac{s}{2\eta} = \frac{1}{2\varepsilon}, \quad 2\varepsilon\left(\sqrt{1 + \eta/\varepsilon} - 1\right) = a\left(1 - e^{-\eta}\right) + 2 s \eta, \quad (1-\delta_c)\, a\, e^{-\eta} = \sqrt{4\pi\varepsilon\, Z m/M}, \quad s = \frac{\delta_c}{1-\delta_c} \sqrt{\frac{\varepsilon}{\eta} \frac{Z m}{M}}`,
+  twin: "the limit solves four equations together, by iteration",
   sources: [HW67],
   changes: first,
   example: ["Ar+"],
@@ -245,6 +323,7 @@ export const RICHARDSONCURRENT = entry("RICHARDSONCURRENT", {
   result: quantities.currentDensity,
   compute: model.richardsonCurrent,
   equation: String.raw`J = A_R T^2 e^{-eW/(k_B T)}, \qquad A_R = \frac{4\pi m e k_B^2}{h^3}`,
+  twin: { formula: "A_R*T_wall^2*EXP(-e*work_function/(k_B*T_wall))" },
   limits: [
     {
       assumption: "few electrons of the metal are fast enough to leave",
@@ -285,6 +364,7 @@ export const EROSIONRATE = entry("EROSIONRATE", {
   result: quantities.erosionRate,
   compute: model.erosionRate,
   equation: String.raw`v = \frac{\Gamma\, Y\, M_\mathrm{formula}}{N_A\, \rho}`,
+  twin: { formula: "flux*sputter_yield*M/density" },
   limits: [
     besideTheInputs("the impact energy (IONIMPACTENERGY) and the threshold of the target", {
       assumption: "the ions strike above the sputtering threshold",
@@ -320,6 +400,7 @@ export const EMISSIONYIELD = entry("EMISSIONYIELD", {
   result: quantities.notNegative,
   compute: emissionYield,
   equation: String.raw`\bar\delta = \int_0^\infty \frac{E}{T_e^2}\, \delta(E)\, e^{-E/T_e}\, dE, \qquad \delta(E) = \delta_\mathrm{max}\, e^2\, \frac{E}{E_\mathrm{max}}\, e^{-2\sqrt{E/E_\mathrm{max}}}`,
+  twin: "the average over the electrons is an integral",
   limits: [
     {
       assumption: "the striking electrons are fast enough for the universal yield curve",
@@ -342,6 +423,7 @@ export const IONEMISSION = entry("IONEMISSION", {
   result: quantities.notNegative,
   compute: model.ionEmission,
   equation: String.raw`\gamma_i \approx 0.016\,(E_\mathrm{iz} - 2W) \ge 0, \qquad \text{energies in eV}`,
+  twin: { formula: "MAX(0,0.016*(E_iz-2*work_function))" },
   limits: [weakIonEmission("γ_i", model.ionEmission)],
   sources: [LL],
   changes: first,
