@@ -29,8 +29,9 @@ const typing: Record<Field["takes"], string> = {
 
 export function fieldView({ name, meaning, takes, input }: Field & { input: Input }, text: string): FieldView {
   const id = `wallfall-input-${name}`;
-  const facts = [inputFacts(input), typing[takes]].filter((fact) => fact !== "").join("; ");
-  const unit = unitOf(input);
+  const many = takes !== "cell";
+  const unit = many ? "" : unitOf(input);
+  const facts = [many ? unitOf(input) : "", inputFacts(input), typing[takes]].filter((fact) => fact !== "").join("; ");
   const doubtNote = h("p", { class: "doubt", id: `${id}-doubt`, hidden: true });
   const control = controlFor(input, id, text);
   const element = h(

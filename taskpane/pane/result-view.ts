@@ -1,4 +1,4 @@
-import { isTable, type Entry } from "../../functions/cells/entry";
+import { isTable, type Entry, type Table } from "../../functions/cells/entry";
 import type { Result } from "../../functions/cells/evaluate";
 import { prettyUnit } from "../../functions/cells/format";
 import { h } from "./h";
@@ -34,33 +34,54 @@ const rowsShown = 12;
 
 function tableView(entry: Entry<any>, result: Result): HTMLElement {
   const columns = isTable(entry.result) ? entry.result.columns : [];
-  // Some functions spill their own title row on request; the headings here already say as much.
-  const titled =
-    columns.length > 0 &&
-    result.length > 1 &&
-    result[0].every((cell) => typeof cell === "string" && cell !== "") &&
-    result[1].some((cell) => typeof cell === "number");
-  const rows = titled ? result.slice(1) : result;
-  const heading = columns.map(({ name, unit }) =>
-    h("th", { scope: "col" }, name, unit && h("span", { class: "unit" }, ` ${prettyUnit(unit)}`)),
-  );
-  const table = h(
-    "table",
-    {},
-    heading.length > 0 && h("thead", {}, h("tr", {}, ...heading)),
-    h("tbody", {}, ...rows.slice(0, rowsShown).map((row) => h("tr", {}, ...row.map(dataCell)))),
-  );
+  const rows = withoutTitles(columns, result);
   const hidden = rows.length - rowsShown;
   return h(
     "div",
     { class: "spill" },
-    h("div", { class: "scroller", tabindex: 0, role: "group", "aria-label": labels.spilledTable }, table),
+    h(
+      "div",
+      { class: "scroller", tabindex: 0, role: "group", "aria-label": labels.spilledTable },
+      rows.length === 1 && columns.length > 1 ? standing(columns, rows[0]) : lying(columns, rows.slice(0, rowsShown)),
+    ),
     hidden > 0 && h("p", { class: "more" }, `${hidden} more ${hidden === 1 ? "row" : "rows"} in the sheet.`),
   );
 }
 
+/** Some functions spill a title row of their own on request; the headings here already say as much. */
+function withoutTitles(columns: Columns, result: Result): Result {
+  const titled =
+    result.length > 1 &&
+    columns.length > 0 &&
+    result[0].every((cell) => typeof cell === "string" && cell !== "") &&
+    result[1].some((cell) => typeof cell === "number");
+  return titled ? result.slice(1) : result;
+}
+
+type Columns = Table["columns"];
+
+/** Columns as in the sheet. */
+function lying(columns: Columns, rows: Result): HTMLElement {
+  return h(
+    "table",
+    {},
+    columns.length > 0 && h("thead", {}, h("tr", {}, ...columns.map((column) => heading(column, "col")))),
+    h("tbody", {}, ...rows.map((row) => h("tr", {}, ...row.map(dataCell)))),
+  );
+}
+
+/** A single row reads better downwards; the last column may spill on to the right. */
+function standing(columns: Columns, row: Result[number]): HTMLElement {
+  const lines = row.map((cell, i) => h("tr", {}, heading(columns[i] ?? columns.at(-1)!, "row"), dataCell(cell)));
+  return h("table", {}, h("tbody", {}, ...lines));
+}
+
+function heading({ name, unit }: Columns[number], scope: "col" | "row"): HTMLElement {
+  return h("th", { scope }, name, unit !== "" && h("span", { class: "unit" }, ` ${prettyUnit(unit)}`));
+}
+
 function dataCell(cell: Result[number][number]): HTMLElement {
-  return h("td", { class: typeof cell === "number" ? "number" : undefined }, cellText(cell));
+  return h("td", { class: typeof cell === "number" ? "number" : "text" }, cellText(cell));
 }
 
 function cellText(cell: Result[number][number]): string {
