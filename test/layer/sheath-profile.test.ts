@@ -92,7 +92,7 @@ function worstAgainstSolver(
 }
 
 test("at the Bohm speed its last row stands at the full width, in steps large or small", () => {
-  for (const points of [2, 20, 2000]) {
+  for (const points of [2, 15, 2000]) {
     const { x } = sheathProfile(300, 1e16, 3, 1, points).at(-1)!;
     expect(x / fullWidth(300, 1e16, 3)).toBeCloseTo(1, 12);
   }
