@@ -10,7 +10,16 @@ export default defineConfig({
           // Its ES module has no .mjs name, so Node.js alone would take it for CommonJS.
           server: { deps: { inline: ["unitmath"] } },
           include: ["test/**/*.test.ts"],
-          exclude: ["test/browser/**", "test/bench/**"],
+          exclude: ["test/browser/**", "test/bench/**", "test/twin/**"],
+        },
+      },
+      {
+        test: {
+          name: "libreoffice",
+          server: { deps: { inline: ["unitmath"] } },
+          include: ["test/twin/**/*.test.ts"],
+          globalSetup: ["test/twin/setup.ts"],
+          hookTimeout: 400_000,
         },
       },
       {

@@ -28,6 +28,7 @@ export const HOTELECTRONPOTENTIAL = entry("HOTELECTRONPOTENTIAL", {
   result: quantities.voltage,
   compute: twoGroups,
   equation: String.raw`\sum_k f_k \frac{\bar v_k}{4}\, e^{V/T_k} = u_B = \sqrt{\frac{Z e T_s}{M}}, \qquad \frac{1}{T_s} = \sum_k \frac{f_k}{T_k}`,
+  twin: "the potential solves an equation that takes iteration",
   limits: [
     // Cold electrons are to hot ones what negative ions are to electrons: the same two Boltzmann groups, the same folds.
     oneEdge((T_c, T_h, hot) => {
@@ -72,6 +73,7 @@ export const EEPFMOMENTS = entry("EEPFMOMENTS", {
     return [[...row, eepf.points, eepf.tail.from, eepf.notes.join("; ")]];
   },
   equation: String.raw`n = \int \! \sqrt{E}\, F \,\mathrm{d}E, \quad T_\mathrm{eff} = \tfrac{2}{3} \langle E \rangle, \quad T_s = \frac{2}{\langle 1/E \rangle}, \quad \Gamma = \tfrac{1}{4} \sqrt{\frac{2e}{m}} \int \! E\, F \,\mathrm{d}E`,
+  twin: "it integrates a measured column piece by piece",
   limits: [startsLow, finelySpaced, reachesFar, quietEnough],
   sources: [LL, R91],
   changes: first,
@@ -91,6 +93,7 @@ export const EEPFFLOATING = entry("EEPFFLOATING", {
     return eepf instanceof Fault ? eepf : eepfFloating(eepf, ion);
   },
   equation: String.raw`\tfrac{1}{4} \sqrt{\frac{2e}{m}} \int_{|V|}^{\infty} (E - |V|)\, F \,\mathrm{d}E = n \sqrt{\frac{Z e T_s}{M}}`,
+  twin: "it integrates a measured column, and the potential takes iteration",
   limits: [startsLow, finelySpaced, tailMeasured, potentialCertain],
   sources: [R91, LL],
   changes: first,

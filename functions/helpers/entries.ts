@@ -17,6 +17,7 @@ export const IONMASS = entry("IONMASS", {
   result: quantities.mass,
   compute: (ion) => ion.mass,
   equation: String.raw`M = \sum_j N_j A_j u - Z m_e`,
+  twin: "it looks atomic weights up",
   sources: [CIAAW, CODATA],
   changes: first,
   example: ["Ar+"],
@@ -30,6 +31,7 @@ export const CONSTANT = entry("CONSTANT", {
   result: quantities.number,
   compute: (name) => constants.find(({ symbol }) => symbol === name)!.value,
   equation: String.raw`e,\ m_e,\ k_B,\ \varepsilon_0,\ u,\ h,\ c,\ N_A`,
+  twin: "it looks a constant up",
   sources: [CODATA],
   changes: first,
   example: ["eps0"],
@@ -48,10 +50,11 @@ export const UNIT = entry("UNIT", {
     );
   },
   equation: String.raw`x_\mathrm{to} = x_\mathrm{from}\,\frac{[\mathrm{from}]}{[\mathrm{to}]}`,
+  twin: "it reads units as text",
   sources: [CODATA],
   changes: first,
   example: [1e11, "cm^-3"],
-  accuracy: "closed form, 4 ulp",
+  accuracy: "one factor, 4 ulp",
 });
 
 /** Rows of ABOUT; the front door knows how many functions there are. */
@@ -74,6 +77,7 @@ export const ABOUT = entry("ABOUT", {
   },
   compute: () => aboutRows(0),
   equation: "",
+  twin: "it computes nothing",
   sources: [CODATA],
   changes: first,
   example: [],

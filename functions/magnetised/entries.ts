@@ -84,7 +84,7 @@ export const GRAZINGLIMIT = entry("GRAZINGLIMIT", {
   equation: String.raw`\theta_g = \arcsin\sqrt{2\pi \frac{m}{M}\left(Z + \frac{T_i}{T_e}\right)}`,
   twin: {
     blanks: { T_i: 0 },
-    formula: 'DEGREES(ASIN(SQRT(2*PI()*m_e/M*(Z+IF(T_e="",0,T_i/T_e)))))',
+    formula: 'DEGREES(ASIN(SQRT(2*PI()*m_e/M*(Z+IF(T_e="",IF(T_i>0,NA(),0),T_i/T_e)))))',
   },
   limits: [coldIons((_ion, _T_e, T_i) => T_i)],
   sources: [S12],

@@ -1,6 +1,6 @@
-import { execFileSync } from "node:child_process";
 import { existsSync } from "node:fs";
 import { chromium, type LaunchOptions } from "playwright-core";
+import { installFromDebian } from "../debian";
 
 const paths = ["/usr/bin/chromium", "/usr/bin/chromium-browser", "/usr/bin/google-chrome"];
 const channels = ["chrome", "msedge"];
@@ -36,14 +36,7 @@ async function launches(options: LaunchOptions): Promise<boolean> {
 
 /** Debian's own package, where this process may install one. */
 function debianChromium(): string {
-  try {
-    if (process.getuid?.() !== 0) throw new Error("Only root may install packages.");
-    const env = { ...process.env, DEBIAN_FRONTEND: "noninteractive" };
-    execFileSync("apt-get", ["update"], { stdio: "ignore", env });
-    execFileSync("apt-get", ["install", "-y", "--no-install-recommends", "chromium"], { stdio: "ignore", env });
-    return "/usr/bin/chromium";
-  } catch (cause) {
-    const advice = "Install Chromium, Chrome or Edge, or set CHROMIUM_PATH to the program.";
-    throw new Error(`The browser tests found no browser. ${advice}`, { cause });
-  }
+  const advice = "Install Chromium, Chrome or Edge, or set CHROMIUM_PATH to the program.";
+  installFromDebian(["chromium"], `The browser tests found no browser. ${advice}`);
+  return "/usr/bin/chromium";
 }
