@@ -11,8 +11,11 @@ export type Value = number | string | boolean;
 /** A spilling result: named columns, quantities across, one row per item. */
 export interface Table {
   columns: readonly { name: string; unit: string }[];
-  /** The numeric columns that make a curve: abscissa and ordinates by name, for the pane's plot. */
-  curve?: { x: string; y: readonly string[] };
+  /**
+   * The numeric columns that make a curve: abscissa and ordinates by name, for the pane's plot. Rows in which the column
+   * `alone` isn't 0 are no points of it: they hold a share of the whole that comes at one abscissa.
+   */
+  curve?: { x: string; y: readonly string[]; alone?: string };
 }
 
 /** The value types of a list of inputs, in order: what compute and the limits are called with. */

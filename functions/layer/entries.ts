@@ -247,7 +247,7 @@ const impactColumns = [
 
 export const IMPACTDISTRIBUTION = entry("IMPACTDISTRIBUTION", {
   inputs: [V_s, s, lambda_i, points, header],
-  result: { columns: impactColumns, curve: { x: "energy", y: ["density"] } },
+  result: { columns: impactColumns, curve: { x: "energy", y: ["density"], alone: "primaries" } },
   compute: (V_s, s, lambda_i, points, header) => {
     const V = Math.abs(V_s);
     if (!Number.isInteger(points)) return notWhole(points);
