@@ -8,6 +8,7 @@ import { formulaProblem, formulaText, type FieldText } from "./formula";
 import { h } from "./h";
 import { labels } from "./labels";
 import { limitsView, verdictLine } from "./limits-view";
+import { plainCellsView } from "./plain-cells-view";
 import { problemOf, resultView } from "./result-view";
 import { section } from "./section";
 import { doubts, standings, summary } from "./standing";
@@ -58,6 +59,7 @@ export function calculationView(
     const formula = formulaText(entry.name, typed);
     write.offer(formula, formulaProblem(formula, typed));
   };
+  const plain = plainCellsView(entry, workbook, () => argumentsOf(texts()));
   const refresh = () => {
     try {
       update();
@@ -83,7 +85,7 @@ export function calculationView(
     verdict,
   );
   form.addEventListener("focusin", ({ target }) => clear(target as HTMLElement, shown));
-  return [...(views.length > 0 ? [section(labels.inputs, form)] : []), shown, write.element];
+  return [...(views.length > 0 ? [section(labels.inputs, form)] : []), shown, write.element, ...(plain ? [plain] : [])];
 }
 
 /** The result stays in sight below the inputs, but never over the one that has the focus. */

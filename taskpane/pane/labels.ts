@@ -18,6 +18,7 @@ export const labels = {
   unit: "Unit",
   writeToCell: "Write to cell",
   copyFormula: "Copy formula",
+  writePlainCells: "Write as plain cells",
   equation: "Equation",
   accuracy: "Accuracy",
   sources: "Sources",

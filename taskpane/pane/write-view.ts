@@ -18,13 +18,7 @@ export function writeView(workbook: Workbook): WriteView {
   let problem: string | undefined;
   const act = workbook.capabilities.has("write") ? writer(workbook) : copy;
   const label = workbook.capabilities.has("write") ? labels.writeToCell : labels.copyFormula;
-  const press = async () => {
-    try {
-      say(problem ?? (await act(formula)));
-    } catch (error) {
-      say(`That did not work: ${error instanceof Error ? error.message : String(error)}`);
-    }
-  };
+  const press = async () => say(problem ?? (await answered(act(formula))));
   const element = h("div", { class: "write" }, shown, h("button", { type: "button", click: press }, label), said);
   const offer = (next: string, refused: string | undefined) => {
     if (next !== formula) say("");
@@ -61,6 +55,15 @@ async function copy(formula: string): Promise<string> {
   return "Copied: paste it into a cell of a sheet that has these functions.";
 }
 
-function spell({ sheet, address }: CellPlace): string {
+/** What an action says, or why it did not work. */
+export async function answered(action: Promise<string>): Promise<string> {
+  try {
+    return await action;
+  } catch (error) {
+    return `That did not work: ${error instanceof Error ? error.message : String(error)}`;
+  }
+}
+
+export function spell({ sheet, address }: CellPlace): string {
   return `${address} on “${sheet}”`;
 }

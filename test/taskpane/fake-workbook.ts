@@ -1,7 +1,8 @@
 import type { CellPlace, Workbook } from "../../taskpane/workbook/workbook";
+import { a1, cellOf } from "../../taskpane/workbook/address";
 import { noWorkbook } from "../../taskpane/workbook/none";
 
-/** A sheet of one selected cell at a time, which remembers what is written to it. */
+/** A sheet with one selected cell, which remembers what is written to it. */
 export function fakeWorkbook(filled: Record<string, unknown> = {}) {
   const cells: Record<string, unknown> = { ...filled };
   const state = { selected: { sheet: "Chamber", address: "B5" } as CellPlace | undefined };
@@ -10,7 +11,14 @@ export function fakeWorkbook(filled: Record<string, unknown> = {}) {
     capabilities: new Set(["write"]),
     selection: () => Promise.resolve(state.selected),
     isFilled: ({ address }) => Promise.resolve(cells[address] !== undefined),
-    write: ({ address }, [[formula]]) => Promise.resolve(void (cells[address] = formula)),
+    write: async ({ address }, rows) => {
+      const from = cellOf(address);
+      rows.forEach((row, i) =>
+        row.forEach((cell, j) => {
+          if (cell !== null) cells[a1({ row: from.row + i, column: from.column + j })] = cell;
+        }),
+      );
+    },
   };
   return { workbook, cells, state };
 }
