@@ -95,6 +95,14 @@ describe("columns", () => {
     ]);
   });
 
+  test("a doubt in a row of inputs stands in its column", () => {
+    const table = check([[1e16], [1e16]], [[5, 3]], [[0.05, 30]]);
+    expect(table).toEqual([
+      ["holds", expect.stringMatching(/too large.*doubtful input: size 30 m/)],
+      ["holds", expect.stringMatching(/too large.*doubtful input: size 30 m/)],
+    ]);
+  });
+
   test("ranges that do not match are refused with both shapes", () => {
     const [[error]] = check(column(1, 2, 3), column(1, 2)) as { message: string }[][];
     expect(error.message).toMatch(/2 rows by 1 column does not match n_e of 3 rows by 1 column/);

@@ -67,6 +67,13 @@ describe("the regime of a plasma and its wall", () => {
     );
   });
 
+  test("doubly charged ions turn √2 tighter in the field, and answer √2 faster", () => {
+    const [once, twice] = ["Ar+", "Ar^2+"].map((ion) => regime(n_e, 3, ion, null, null, 300, null, 0.01, 1e8));
+    // √(Z T_e M)/(ZB), and ω_pi = √(Z e² n_e/(ε₀M))
+    expect(once[3][2] / twice[3][2]).toBeCloseTo(Math.SQRT2, 4);
+    expect(once[4][2] / twice[4][2]).toBeCloseTo(Math.SQRT2, 4);
+  });
+
   test("ions that collide within the sheath make it fail", () => {
     expect(verdicts(n_e, 3, "Ar+", 5, undefined, 300)[0]).toBe("fails: ions collide inside the sheath");
   });

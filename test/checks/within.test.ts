@@ -30,6 +30,7 @@ describe("a comparison", () => {
   test("allows the larger of two tolerances", () => {
     expect(within(1.04, 1, 0.05, 0.01)).toBe("holds");
     expect(within(0.05, 0.01, 0.05, 0.1)).toBe("holds");
+    expect(within(1.055, 1, 0.05, 0.01)).toBe("fails: 1.055 against 1 ± 0.05");
   });
 
   test("shows as many digits as the difference needs", () => {
