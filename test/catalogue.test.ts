@@ -28,6 +28,8 @@ describe.each(catalogue.map((entry) => [entry.name, entry] as const))("%s", (nam
     const wanted = entry.takesUnit ? [...inputs, ["unit", true]] : inputs;
     expect(parameters.map((each) => [each.name, each.optional ?? false])).toEqual(wanted);
     expect(declaration.parameters.every(({ dimensionality }) => dimensionality === "matrix")).toBe(true);
+    const repeating = declaration.parameters.filter((each) => each.repeating).map((each) => each.name);
+    expect(repeating).toEqual(entry.repeats ? [entry.repeats.name] : []);
   });
 
   test("the description of each quantity states the unit that it is read in", () => {
