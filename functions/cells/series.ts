@@ -141,6 +141,6 @@ function own(value: number, inForce: Conversion | undefined): number {
 }
 
 /** "I (mA)", "I [mA]", "I / mA", "I, mA": the text where a heading names its unit. */
-function unitInHeading(text: string): string | undefined {
+export function unitInHeading(text: string): string | undefined {
   return (/[([{]\s*(.+?)\s*[)\]}]\s*$/.exec(text) ?? /[/,]\s*([^/,]+)$/.exec(text))?.[1];
 }
