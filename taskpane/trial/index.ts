@@ -17,9 +17,13 @@ async function start(): Promise<void> {
   const dark = matchMedia("(prefers-color-scheme: dark)");
   const grid = createGrid(part("grid"), functions, layOut(openingSheets, dark.matches), dark.matches);
   dark.addEventListener("change", () => grid.setDark(dark.matches));
+  await grid.drawn;
   mountTabs(part("tabs"), grid);
   mountStatusLine(part("status"), grid);
-  mountPane(part("pane"), trialWorkbook(grid));
+  const workbook = trialWorkbook(grid);
+  mountPane(part("pane"), workbook);
+  // For the browser's console, and for tests, which can't read the cells off a canvas.
+  Object.assign(window, { wallfallWorkbook: workbook });
   moveFocusWithF6(part("pane"), grid);
 }
 

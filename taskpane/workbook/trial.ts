@@ -1,7 +1,7 @@
 import { BooleanNumber, CellValueType, type ICellData } from "@univerjs/core";
 import type { FWorksheet } from "@univerjs/preset-sheets-core";
 import { selectedCell, type Grid } from "../trial/grid/grid";
-import { a1, cellOf, type Cell } from "./address";
+import { a1, cellOf, cellsIn, type Cell } from "./address";
 import type { CellContent, CellPlace, SheetContent, Workbook, WorkbookContent } from "./workbook";
 
 type Written = string | number | boolean | null;
@@ -12,8 +12,9 @@ export function trialWorkbook(grid: Grid): Workbook {
   return {
     capabilities: new Set(["write", "read", "settings"]),
     selection: () => Promise.resolve(placeOf(grid)),
-    onSelection: (listener) => grid.onSelection(() => listener(placeOf(grid))),
-    isFilled: async (place) => contents.isFilled(sheetNamed(grid, place.sheet), cellOf(place.address)),
+    onSelection: (listener) => watchSelection(grid, listener),
+    isFilled: async ({ sheet, address }) =>
+      cellsIn(address).some((cell) => contents.isFilled(sheetNamed(grid, sheet), cell)),
     async write(from, cells) {
       await workbook.endEditingAsync(true);
       write(sheetNamed(grid, from.sheet), cellOf(from.address), cells);
@@ -25,7 +26,7 @@ export function trialWorkbook(grid: Grid): Workbook {
       await workbook.endEditingAsync(true);
       workbook.setActiveSheet(sheet);
       sheet.setActiveRange(sheet.getRange(row, column));
-      sheet.scrollToCell(row, column);
+      bringIntoView(sheet, { row, column });
     },
     read: (progress, signal) => read(grid, progress, signal),
     async replaceSheet(name, cells) {
@@ -37,6 +38,7 @@ export function trialWorkbook(grid: Grid): Workbook {
       workbook.setActiveSheet(shown);
       await grid.calculated();
     },
+    addChart: () => Promise.reject(new Error("the trial sheet draws no charts")),
     getSetting: (key) => Promise.resolve(getSetting(key)),
     setSetting: (key, value) => Promise.resolve(setSetting(key, value)),
   };
@@ -47,10 +49,34 @@ function placeOf(grid: Grid): CellPlace {
   return { sheet: sheet.getSheetName(), address: a1(cell) };
 }
 
+/** The grid also calls at once, and when the same cell is selected again. */
+function watchSelection(grid: Grid, listener: (place: CellPlace) => void): () => void {
+  let last = placeOf(grid);
+  return grid.onSelection(() => {
+    const place = placeOf(grid);
+    if (place.sheet === last.sheet && place.address === last.address) return;
+    last = place;
+    listener(place);
+  });
+}
+
 function sheetNamed({ workbook }: Grid, name: string): FWorksheet {
   const sheet = workbook.getSheetByName(name);
   if (!sheet) throw new Error(`there is no sheet named "${name}"`);
   return sheet;
+}
+
+/** Scrolls only where it must, and then leaves some cells above and before: the grid counts rows under a frozen head. */
+function bringIntoView(sheet: FWorksheet, { row, column }: Cell): void {
+  const seen = sheet.getVisibleRange();
+  const inside = (at: number, from: number, to: number) => at >= from && at < to;
+  if (
+    seen &&
+    (inside(row, seen.startRow, seen.endRow) || row < sheet.getFrozenRows()) &&
+    inside(column, seen.startColumn, seen.endColumn)
+  )
+    return;
+  sheet.scrollToCell(Math.max(0, row - 5), Math.max(0, column - 2));
 }
 
 /** Cells are written as what they are, never parsed: the text "1/2" stays text. */

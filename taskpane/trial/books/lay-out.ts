@@ -23,7 +23,9 @@ const settingsRow = 3;
 const settingsInARow = 4;
 const titleHeight = 30;
 const headingHeight = 36;
-const columnWidth = 84;
+const columnWidth = 74;
+/** Room for the twelve digits that the grid shows of a number without a format of its own. */
+const spareColumnWidth = 100;
 const rowHeight = 22;
 
 function rowsOf(sheet: OpeningSheet) {
@@ -41,8 +43,9 @@ function layOutSheet(id: string, sheet: OpeningSheet, looks: Looks): Partial<IWo
     cellData: cellsOf(sheet, looks),
     rowCount: Math.max(200, last + 50),
     columnCount: Math.max(26, sheet.columns.length + 8),
-    defaultColumnWidth: columnWidth,
+    defaultColumnWidth: spareColumnWidth,
     defaultRowHeight: rowHeight,
+    defaultStyle: looks.words,
     rowData: { 0: { h: titleHeight, ia: 0 }, [heading]: { h: headingHeight, ia: 0 } },
     columnData: Object.fromEntries(sheet.columns.map(({ width }, i) => [i, { w: width ?? columnWidth }])),
     rowHeader: { width: 40 },

@@ -30,7 +30,7 @@ export interface Column {
   key: string;
   heading: string;
   unit?: string;
-  /** Pixels; 84 unless given. */
+  /** Pixels; 74 unless given. */
   width?: number;
   /** Number format; "words" for a column of text. */
   format?: string;

@@ -1,7 +1,7 @@
 import { CellValueType, type ICellData, type IObjectMatrixPrimitiveType, type Nullable } from "@univerjs/core";
 import {
   ERROR_TYPE_SET,
-  type ErrorType,
+  ErrorType,
   type FormulaDataModel,
   type FWorkbook,
   type FWorksheet,
@@ -37,11 +37,20 @@ export class Contents {
   }
 
   spills(sheet: FWorksheet): SheetContent["spills"] {
-    const anchors = this.formulas.getArrayFormulaRange()[this.workbook.getId()]?.[sheet.getSheetId()];
-    return allCells(anchors).map(({ cell: { startRow, startColumn, endRow, endColumn } }) => {
+    return this.spilledRanges(sheet).map(({ startRow, startColumn, endRow, endColumn }) => {
       const anchor = a1({ row: startRow, column: startColumn });
       return { anchor, range: `${anchor}:${a1({ row: endRow, column: endColumn })}` };
     });
+  }
+
+  /** The cell whose formula filled this one with its value. */
+  filledFrom(sheet: FWorksheet, { row, column }: Cell): string | undefined {
+    const range = this.spilledRanges(sheet).find(
+      ({ startRow, startColumn, endRow, endColumn }) =>
+        row >= startRow && row <= endRow && column >= startColumn && column <= endColumn,
+    );
+    if (!range || (range.startRow === row && range.startColumn === column)) return undefined;
+    return a1({ row: range.startRow, column: range.startColumn });
   }
 
   /** The last row and column that hold anything, spilled values included; -1 where the sheet is empty. */
@@ -55,6 +64,15 @@ export class Contents {
     sheet.getSheet().getCellMatrix().forValue(reach);
     for (const { row, column, cell } of allCells(this.spilledCells(sheet))) reach(row, column, cell);
     return last;
+  }
+
+  private spilledRanges(sheet: FWorksheet) {
+    const anchors = this.formulas.getArrayFormulaRange()[this.workbook.getId()]?.[sheet.getSheetId()];
+    // The grid lists the range of a spill that found no room, too.
+    const isBlocked = (row: number, column: number) => sheet.getSheet().getCellRaw(row, column)?.v === ErrorType.SPILL;
+    return allCells(anchors)
+      .filter(({ row, column }) => !isBlocked(row, column))
+      .map(({ cell }) => cell);
   }
 
   private spilledCells(sheet: FWorksheet) {

@@ -2,7 +2,6 @@ import { LocaleType, mergeLocales, ThemeService, Univer, UniverInstanceType, typ
 import { FUniver } from "@univerjs/core/lib/facade";
 import {
   CalculationMode,
-  CELL_INVERTED_INDEX_CACHE,
   CellAlertManagerService,
   FormulaDataModel,
   ILayoutService,
@@ -15,10 +14,12 @@ import {
 import english from "@univerjs/preset-sheets-core/locales/en-US";
 import type { Cell } from "../../workbook/address";
 import type { Functions } from "../host";
+import { nameParts } from "./accessible-names";
 import { Contents } from "./contents";
 import { showOwnMessages } from "./error-popup";
 import { Messages } from "./messages";
 import { parameterHelp } from "./parameter-help";
+import { repairFormulaEngine } from "./repairs";
 import { gridFunction, namespace } from "./sheath-function";
 import { applyAccent } from "./theme";
 
@@ -32,13 +33,15 @@ export interface Grid {
   onCalculated(listener: () => void): void;
   /** Resolves when what was written so far is calculated. */
   calculated(): Promise<void>;
+  /** Resolves when the grid is drawn and takes the keyboard. */
+  drawn: Promise<void>;
   focus(): void;
   setDark(dark: boolean): void;
 }
 
 /** A spreadsheet grid with its formula bar in `container`, knowing every bound function; nothing else of its kind. */
 export function createGrid(container: HTMLElement, functions: Functions, data: IWorkbookData, darkMode: boolean): Grid {
-  switchOffInvertedIndex();
+  repairFormulaEngine();
   const messages = new Messages();
   const univer = new Univer({
     locale: LocaleType.EN_US,
@@ -51,9 +54,11 @@ export function createGrid(container: HTMLElement, functions: Functions, data: I
     if (Array.isArray(plugin)) univer.registerPlugin(plugin[0], plugin[1]);
     else univer.registerPlugin(plugin);
   }
+  const api = FUniver.newAPI(univer);
+  nameParts(container, api);
+  const drawn = untilDrawn(api);
   univer.createUnit(UniverInstanceType.UNIVER_SHEET, data);
 
-  const api = FUniver.newAPI(univer);
   const workbook = api.getActiveWorkbook()!;
   const contents = new Contents(workbook, injector.get(FormulaDataModel), messages);
   showOwnMessages(injector.get(CellAlertManagerService), workbook, contents);
@@ -79,9 +84,18 @@ export function createGrid(container: HTMLElement, functions: Functions, data: I
     },
     onCalculated: (listener) => void api.getFormula().calculationResultApplied(() => listener()),
     calculated: () => api.getFormula().onCalculationResultApplied(),
+    drawn,
     focus: () => injector.get(ILayoutService).focus(),
     setDark: (dark) => api.toggleDarkMode(dark),
   };
+}
+
+function untilDrawn(api: FUniver): Promise<void> {
+  return new Promise((resolve) =>
+    api.addEvent(api.Event.LifeCycleChanged, ({ stage }) => {
+      if (stage === api.Enum.LifecycleStages.Rendered) requestAnimationFrame(() => setTimeout(resolve));
+    }),
+  );
 }
 
 /** The one cell that typing goes to, and its sheet. */
@@ -107,10 +121,4 @@ function pluginsFor(container: HTMLElement, functions: Functions, messages: Mess
       initialFormulaComputing: CalculationMode.FORCED,
     },
   }).plugins;
-}
-
-/** The grid's look-up index makes spilling quadratic in the rows; without it a search scans, which is quick enough. */
-function switchOffInvertedIndex(): void {
-  CELL_INVERTED_INDEX_CACHE.set = () => {};
-  CELL_INVERTED_INDEX_CACHE.setContinueBuildingCache = () => {};
 }

@@ -55,5 +55,6 @@ function isLeftOut(value: BaseValueObject): boolean {
 
 function checkCount({ name, parameters }: Declaration, count: number): unknown {
   if (count <= parameters.length || parameters.some(({ repeating }) => repeating)) return undefined;
-  return hostError("#VALUE!", `${name} takes at most ${parameters.length} arguments; here are ${count}.`);
+  const most = parameters.length === 1 ? "1 argument" : `${parameters.length} arguments`;
+  return hostError("#VALUE!", `${name} takes at most ${most}; here are ${count}.`);
 }
