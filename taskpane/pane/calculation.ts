@@ -2,8 +2,12 @@ import { isTable, type Entry } from "../../functions/cells/entry";
 import { frontDoors } from "../../functions/front-doors";
 import type { Workbook } from "../workbook/workbook";
 import { brokenView } from "./broken";
+import { curveOf } from "./curve-data";
+import { curveView } from "./curve-view";
 import { fieldView, outcomeId, unitChoice, type FieldView } from "./field-view";
 import { argumentsOf, exampleTexts, fieldsOf, resultUnit } from "./fields";
+import { figureOf } from "./figure-of";
+import { figureView } from "./figure-view";
 import { formulaProblem, formulaText, type FieldText } from "./formula";
 import { h } from "./h";
 import { labels } from "./labels";
@@ -12,6 +16,8 @@ import { plainCellsView } from "./plain-cells-view";
 import { problemOf, resultView } from "./result-view";
 import { section } from "./section";
 import { doubts, standings, summary } from "./standing";
+import { sweepView } from "./sweep-view";
+import { readTyped } from "./typed";
 import type { Words } from "./words";
 import { writeView } from "./write-view";
 
@@ -36,7 +42,10 @@ export function calculationView(
   const controls = [...views.map(({ control }) => control), ...(unit ? [unit] : [])];
   const outcome = h("div", { id: outcomeId, role: "status" });
   const verdict = h("div", { role: "status" });
+  const curve = curveView(entry.name);
+  const figure = h("div");
   const write = writeView(workbook);
+  const sweep = sweepView(entry, workbook);
 
   const texts = (): FieldText[] => fields.map(({ name, takes }, i) => ({ name, text: controls[i].value, takes }));
   const update = () => {
@@ -56,6 +65,11 @@ export function calculationView(
     if (unit) unit.hidden = problem !== undefined;
     outcome.replaceChildren(resultView(entry, result, resultUnit(entry, unit?.value ?? "")));
     verdict.replaceChildren(...(sum ? [verdictLine(sum.word, sum.text)] : []));
+    const drawn = figureOf(entry, args);
+    figure.replaceChildren(...(drawn ? [figureView(drawn)] : []));
+    curve.show(curveOf(entry, result));
+    const read = typed.map(({ text }) => readTyped(text));
+    sweep?.follow(read.slice(0, entry.inputs.length), read[entry.inputs.length] ?? readTyped(""));
     const formula = formulaText(entry.name, typed);
     write.offer(formula, formulaProblem(formula, typed));
   };
@@ -81,11 +95,18 @@ export function calculationView(
     "section",
     { class: "result" },
     h("h3", {}, labels.result),
+    curve.element,
     h("div", { class: "outcome" }, outcome, unit && h("label", { class: "unseen", for: unit.id }, labels.unit), unit),
     verdict,
   );
   form.addEventListener("focusin", ({ target }) => clear(target as HTMLElement, shown));
-  return [...(views.length > 0 ? [section(labels.inputs, form)] : []), shown, write.element, ...(plain ? [plain] : [])];
+  return [
+    ...(views.length > 0 ? [section(labels.inputs, form, figure)] : []),
+    shown,
+    write.element,
+    ...(plain ? [plain] : []),
+    ...(sweep ? [sweep.element] : []),
+  ];
 }
 
 /** The result stays in sight below the inputs, but never over the one that has the focus. */

@@ -57,7 +57,7 @@ export function verdictLine(word: Word, text: string): HTMLElement {
  * The wall and what comes towards it: it stops short where a limit holds, touches where it is marginal, and goes through
  * where it fails; where nothing is known there is only the wall. The word always stands beside it.
  */
-function mark(word: Word): SVGElement {
+export function mark(word: Word): SVGElement {
   return svg(
     "svg",
     { class: "mark", viewBox: "0 0 28 14", "aria-hidden": "true" },

@@ -28,3 +28,13 @@ export function cornersOf(range: string): { from: Cell; to: Cell } {
   const [first, last = first] = range.split(":");
   return { from: cellOf(first), to: cellOf(last) };
 }
+
+/** Every cell of a range, row by row. */
+export function cellsIn(range: string): Cell[] {
+  const { from, to } = cornersOf(range);
+  const columns = to.column - from.column + 1;
+  return Array.from({ length: (to.row - from.row + 1) * columns }, (_, i) => ({
+    row: from.row + Math.floor(i / columns),
+    column: from.column + (i % columns),
+  }));
+}

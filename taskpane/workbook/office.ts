@@ -4,13 +4,13 @@
  * platform's documentation stands in one small function, so that one that proves wrong is mended in one place.
  */
 import { a1, cellOf, cornersOf } from "./address";
-import type { CellContent, CellPlace, SheetContent, Workbook, WorkbookContent } from "./workbook";
+import type { CellContent, CellPlace, Chart, SheetContent, Workbook, WorkbookContent } from "./workbook";
 
 type Written = string | number | boolean | null;
 
 export function officeWorkbook(): Workbook {
   return {
-    capabilities: new Set(["write", "read", "settings"]),
+    capabilities: new Set(["write", "read", "settings", "chart"]),
     selection: () => Excel.run(async (context) => placeOf(context, context.workbook.getActiveCell())),
     onSelection: watchSelection,
     isFilled: (place) => Excel.run((context) => isFilled(context, place)),
@@ -19,6 +19,7 @@ export function officeWorkbook(): Workbook {
     goTo: (place) => Excel.run((context) => goTo(context, place)),
     read: (progress, signal) => Excel.run((context) => readAll(context, progress, signal)),
     replaceSheet: (name, cells) => Excel.run((context) => replaceSheet(context, name, cells)),
+    addChart: (chart) => Excel.run((context) => addChart(context, chart)),
     getSetting: (key) => Excel.run((context) => getSetting(context, key)),
     setSetting: (key, value) =>
       Excel.run(async (context) => {
@@ -68,7 +69,9 @@ async function isFilled(context: Excel.RequestContext, { sheet, address }: CellP
   const range = sheetNamed(context, sheet).getRange(address);
   range.load(["formulas", "valueTypes"]);
   await context.sync();
-  return range.formulas[0][0] !== "" || range.valueTypes[0][0] !== "Empty";
+  return (
+    range.formulas.flat().some((formula) => formula !== "") || range.valueTypes.flat().some((type) => type !== "Empty")
+  );
 }
 
 async function write(
@@ -106,6 +109,22 @@ async function replaceSheet(context: Excel.RequestContext, name: string, cells: 
   const sheet = found.isNullObject ? context.workbook.worksheets.add(name) : found;
   if (!found.isNullObject) sheet.getRange().clear();
   await write(context, sheet, "A1", cells);
+  await context.sync();
+}
+
+/** Points joined by lines over a measured abscissa: of the host's kinds of chart only the scatter kinds have one. */
+async function addChart(context: Excel.RequestContext, { sheet, cells, at, ...chart }: Chart): Promise<void> {
+  const target = sheetNamed(context, sheet);
+  const drawn = target.charts.add("XYScatterLinesNoMarkers", target.getRange(cells), "Columns");
+  const { categoryAxis, valueAxis } = drawn.axes;
+  drawn.title.text = chart.title;
+  categoryAxis.title.text = chart.titleX;
+  if (chart.titleY !== "") {
+    valueAxis.title.text = chart.titleY;
+    drawn.legend.visible = false;
+  }
+  if (chart.logarithmicX) categoryAxis.scaleType = "Logarithmic";
+  drawn.setPosition(at.from, at.to);
   await context.sync();
 }
 

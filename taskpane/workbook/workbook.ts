@@ -27,12 +27,25 @@ export interface WorkbookContent {
   names: Record<string, string>;
 }
 
+/** A curve to be drawn from cells: the first column across, the others up, each under its heading. */
+export interface Chart {
+  sheet: string;
+  /** A1 address of all its cells with their headings: "B9:C34". */
+  cells: string;
+  title: string;
+  titleX: string;
+  titleY: string;
+  logarithmicX: boolean;
+  /** The cells over which it lies. */
+  at: { from: string; to: string };
+}
+
 export interface Workbook {
   /** The selected cell, or undefined where there is no sheet (the pane as a plain page). */
   selection(): Promise<CellPlace | undefined>;
   /** Calls back whenever another cell is selected; returns how to stop that. */
   onSelection(listener: (place: CellPlace) => void): () => void;
-  /** Whether a cell holds anything that writing to it would destroy: a value, a formula, a part of a spill. */
+  /** Whether a cell, or any cell of a range such as "B5:D9", holds what writing would destroy: a value, a formula, a part of a spill. */
   isFilled(place: CellPlace): Promise<boolean>;
   /** Writes formulas or values (null leaves a cell as it is) from the given cell on, to the right and down. */
   write(from: CellPlace, cells: (string | number | boolean | null)[][]): Promise<void>;
@@ -45,6 +58,8 @@ export interface Workbook {
   /** Small settings kept inside the workbook, such as the reasons for accepted findings. */
   getSetting(key: string): Promise<string | undefined>;
   setSetting(key: string, value: string): Promise<void>;
+  /** Draws cells as a chart, where "chart" is one of the capabilities. */
+  addChart(chart: Chart): Promise<void>;
   /** What this workbook can't do, so that the pane hides it: "write", "read", "chart". */
   readonly capabilities: ReadonlySet<"write" | "read" | "settings" | "chart">;
 }

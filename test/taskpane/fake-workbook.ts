@@ -1,5 +1,5 @@
 import type { CellPlace, Workbook } from "../../taskpane/workbook/workbook";
-import { a1, cellOf } from "../../taskpane/workbook/address";
+import { a1, cellOf, cellsIn } from "../../taskpane/workbook/address";
 import { noWorkbook } from "../../taskpane/workbook/none";
 
 /** A sheet with one selected cell, which remembers what is written to it. */
@@ -10,7 +10,7 @@ export function fakeWorkbook(filled: Record<string, unknown> = {}) {
     ...noWorkbook,
     capabilities: new Set(["write"]),
     selection: () => Promise.resolve(state.selected),
-    isFilled: ({ address }) => Promise.resolve(cells[address] !== undefined),
+    isFilled: async ({ address }) => cellsIn(address).some((cell) => cells[a1(cell)] !== undefined),
     write: async ({ address }, rows) => {
       const from = cellOf(address);
       rows.forEach((row, i) =>

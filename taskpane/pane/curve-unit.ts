@@ -1,0 +1,45 @@
+import { prettyUnit } from "../../functions/cells/format";
+import { numberText } from "./number-text";
+
+/** A unit in which a value has few digits: how many of the plain unit it is, and its name. */
+export interface ScaledUnit {
+  factor: number;
+  text: string;
+  /** A unit of its own, such as mm, and no mere power of ten. */
+  named: boolean;
+}
+
+const prefixes: Record<number, string> = { 9: "G", 6: "M", 3: "k", [-3]: "m", [-6]: "µ", [-9]: "n", [-12]: "p" };
+const takesPrefix = /^(m|V|eV|s|A|Hz|Pa|T|W|F|ohm)(?=$|\/| )/;
+
+/** With a prefix where the unit may have one, else with a power of ten. */
+export function scaledUnit(unit: string, size: number): ScaledUnit {
+  const plain: ScaledUnit = { factor: 1, text: prettyUnit(unit), named: true };
+  const mayHavePrefix = takesPrefix.test(unit);
+  if (size === 0 || (size >= (mayHavePrefix ? 0.1 : 0.01) && size < 1e4)) return plain;
+  const power = 3 * Math.floor(Math.log10(size) / 3);
+  const factor = Number(`1e${power}`);
+  const prefix = mayHavePrefix ? prefixes[power] : undefined;
+  if (prefix) return { factor, text: prefix + plain.text, named: true };
+  const ten = `10${superscript(power)}`;
+  return { factor, text: `${ten} ${plain.text}`.trimEnd(), named: false };
+}
+
+/** A value with its unit as it stands in a sentence. */
+export function quantity(value: number, unit: string): string {
+  const { factor, text, named } = scaledUnit(unit, Math.abs(value));
+  return named
+    ? `${numberText(value / factor, 4)} ${text}`.trimEnd()
+    : `${numberText(value, 4)} ${prettyUnit(unit)}`.trimEnd();
+}
+
+/** "−300 to −0.339 V": both ends in the unit that suits the larger. */
+export function span(first: number, last: number, unit: string): string {
+  const { factor, text, named } = scaledUnit(unit, Math.max(Math.abs(first), Math.abs(last)));
+  const by = named ? factor : 1;
+  return `${numberText(first / by, 4)} to ${numberText(last / by, 4)} ${named ? text : prettyUnit(unit)}`.trimEnd();
+}
+
+function superscript(power: number): string {
+  return [...String(power)].map((digit) => (digit === "-" ? "⁻" : "⁰¹²³⁴⁵⁶⁷⁸⁹"[Number(digit)])).join("");
+}
