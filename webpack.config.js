@@ -53,6 +53,12 @@ const common = (origin) => ({
   ],
 });
 
+/** The trial sheet's grid comes with hyphenation for seventy languages (5 MB), of which it only ever loads British English. */
+const noHyphenation = new webpack.IgnorePlugin({
+  resourceRegExp: /^\.\/(?!en-gb)[\w-]+\.js$/,
+  contextRegExp: /@univerjs[\\/]engine-render[\\/]lib[\\/]es$/,
+});
+
 /**
  * Options, each as --env NAME=VALUE: `origin` the address the files will be served under, `office` "hosted" to take the
  * host's library from its vendor instead of from the build, `id` and `name` for an organisation's own copy.
@@ -72,8 +78,8 @@ export default (env = {}) => {
       plugins: [...base.plugins, licences.collector(), ...plugins],
     };
   };
-  const styled = (name, folder) =>
-    bundle(name, `${folder}/index.ts`, new MiniCssExtractPlugin({ filename: "[name].css" }));
+  const styled = (name, folder, ...plugins) =>
+    bundle(name, `${folder}/index.ts`, new MiniCssExtractPlugin({ filename: "[name].css" }), ...plugins);
   const functions = bundle(
     "functions",
     "functions/register.ts",
@@ -81,8 +87,8 @@ export default (env = {}) => {
     new SizePlugin({ asset: "functions.js", limit: 60 * 1024 }),
   );
   functions.module.rules.push({ test: /entries\.ts$/, enforce: "pre", loader: leaveOut });
-  const bundles = [functions, styled("taskpane", "taskpane"), styled("trial", "taskpane/trial")].filter(({ entry }) =>
-    Object.values(entry).every((file) => existsSync(file)),
+  const bundles = [functions, styled("taskpane", "taskpane"), styled("trial", "taskpane/trial", noHyphenation)].filter(
+    ({ entry }) => Object.values(entry).every((file) => existsSync(file)),
   );
 
   /** Pages are written by hand and copied as they stand. */
