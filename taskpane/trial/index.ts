@@ -15,7 +15,7 @@ const part = (id: string) => document.getElementById(id)!;
 async function start(): Promise<void> {
   const functions = await loadFunctions();
   const dark = matchMedia("(prefers-color-scheme: dark)");
-  const grid = createGrid(part("grid"), functions, layOut(openingSheets, dark.matches), dark.matches);
+  const grid = createGrid(part("grid"), functions, layOut(openingSheets, dark.matches), [], dark.matches);
   dark.addEventListener("change", () => grid.setDark(dark.matches));
   await grid.drawn;
   mountTabs(part("tabs"), grid);

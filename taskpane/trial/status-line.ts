@@ -21,6 +21,7 @@ export function mountStatusLine(place: HTMLElement, grid: Grid): void {
   };
   grid.onSelection(show);
   grid.onCalculated(show);
+  grid.onOpened(show);
   show();
 }
 

@@ -2,11 +2,13 @@ import { h } from "../pane/h";
 import type { Grid } from "./grid/grid";
 
 /** A tab for every sheet under the grid; arrow keys move between them, as in any list of tabs. */
-export function mountTabs(place: HTMLElement, { api, workbook }: Grid): void {
+export function mountTabs(place: HTMLElement, grid: Grid): void {
+  const { api } = grid;
   const show = () => {
+    const { workbook } = grid;
     const hadFocus = place.contains(document.activeElement);
     const active = workbook.getActiveSheet().getSheetId();
-    const sheets = workbook.getSheets();
+    const sheets = workbook.getSheets().filter((sheet) => !sheet.isSheetHidden());
     const tabs = sheets.map((sheet) => {
       const selected = sheet.getSheetId() === active;
       return h(
@@ -26,7 +28,8 @@ export function mountTabs(place: HTMLElement, { api, workbook }: Grid): void {
     if (hadFocus) tabs[sheets.findIndex((sheet) => sheet.getSheetId() === active)]?.focus();
   };
   place.addEventListener("keydown", (event) => {
-    const sheets = workbook.getSheets();
+    const { workbook } = grid;
+    const sheets = workbook.getSheets().filter((sheet) => !sheet.isSheetHidden());
     const active = workbook.getActiveSheet().getSheetId();
     const next = moved(
       event.key,
@@ -45,6 +48,7 @@ export function mountTabs(place: HTMLElement, { api, workbook }: Grid): void {
     api.Event.SheetNameChanged,
   ])
     api.addEvent(event, show);
+  grid.onOpened(show);
   show();
 }
 

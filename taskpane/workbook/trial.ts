@@ -8,28 +8,28 @@ type Written = string | number | boolean | null;
 
 /** The trial sheet's grid behind the pane's interface. */
 export function trialWorkbook(grid: Grid): Workbook {
-  const { workbook, contents } = grid;
   return {
     capabilities: new Set(["write", "read", "settings"]),
     selection: () => Promise.resolve(placeOf(grid)),
     onSelection: (listener) => watchSelection(grid, listener),
     isFilled: async ({ sheet, address }) =>
-      cellsIn(address).some((cell) => contents.isFilled(sheetNamed(grid, sheet), cell)),
+      cellsIn(address).some((cell) => grid.contents.isFilled(sheetNamed(grid, sheet), cell)),
     async write(from, cells) {
-      await workbook.endEditingAsync(true);
+      await grid.workbook.endEditingAsync(true);
       write(sheetNamed(grid, from.sheet), cellOf(from.address), cells);
       await grid.calculated();
     },
     async goTo(place) {
       const sheet = sheetNamed(grid, place.sheet);
       const { row, column } = cellOf(place.address);
-      await workbook.endEditingAsync(true);
-      workbook.setActiveSheet(sheet);
+      await grid.workbook.endEditingAsync(true);
+      grid.workbook.setActiveSheet(sheet);
       sheet.setActiveRange(sheet.getRange(row, column));
       bringIntoView(sheet, { row, column });
     },
     read: (progress, signal) => read(grid, progress, signal),
     async replaceSheet(name, cells) {
+      const { workbook } = grid;
       await workbook.endEditingAsync(true);
       const shown = workbook.getActiveSheet();
       const found = workbook.getSheetByName(name);
@@ -126,7 +126,7 @@ async function read(
 const cellsAtOnce = 20_000;
 
 async function readSheet(
-  { contents }: Grid,
+  { contents, tables }: Grid,
   sheet: FWorksheet,
   progress: (done: number) => void,
   signal?: AbortSignal,
@@ -141,7 +141,14 @@ async function readSheet(
     if (row % Math.ceil(cellsAtOnce / columns.length) === 0) await pause();
     progress((row + 1) / (last.row + 1));
   }
-  return { name: sheet.getSheetName(), origin: "A1", values, formulas, spills: contents.spills(sheet), tables: [] };
+  return {
+    name: sheet.getSheetName(),
+    origin: "A1",
+    values,
+    formulas,
+    spills: contents.spills(sheet),
+    tables: tables.contents(sheet),
+  };
 }
 
 function pause(): Promise<void> {

@@ -1,20 +1,14 @@
-import type { FUniver } from "@univerjs/core/lib/facade";
-
 /** Names for what the grid leaves nameless, and its canvases out of the order of the Tab key: they lead nowhere. */
-export function nameParts(container: HTMLElement, api: FUniver): void {
-  const { Rendered, Steady } = api.Enum.LifecycleStages;
-  api.addEvent(api.Event.LifeCycleChanged, ({ stage }) => {
-    if (stage !== Rendered && stage !== Steady) return;
-    const all = (selector: string) => [...container.querySelectorAll(selector)];
-    set(all("input[type=text]"), { "aria-label": "Address of the selected cell" });
-    set(all("a[aria-haspopup=dialog]"), { role: "button", "aria-label": "Defined names" });
-    set(
-      all("button:not([aria-label])").filter((button) => !button.textContent?.trim()),
-      { "aria-label": "Taller formula bar" },
-    );
-    set(all("canvas"), { tabindex: "-1" });
-    all("section[aria-live]").forEach((section, i) => set([section], { "aria-label": `Notices ${i + 1}` }));
-  });
+export function nameParts(container: HTMLElement): void {
+  const all = (selector: string) => [...container.querySelectorAll(selector)];
+  set(all("input[type=text]"), { "aria-label": "Address of the selected cell" });
+  set(all("a[aria-haspopup=dialog]"), { role: "button", "aria-label": "Defined names" });
+  set(
+    all("button:not([aria-label])").filter((button) => !button.textContent?.trim()),
+    { "aria-label": "Taller formula bar" },
+  );
+  set(all("canvas"), { tabindex: "-1" });
+  all("section[aria-live]").forEach((section, i) => set([section], { "aria-label": `Notices ${i + 1}` }));
 }
 
 function set(elements: readonly Element[], attributes: Record<string, string>): void {

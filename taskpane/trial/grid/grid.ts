@@ -5,6 +5,7 @@ import {
   CellAlertManagerService,
   FormulaDataModel,
   ILayoutService,
+  ISuperTableService,
   SetFormulaCalculationStartMutation,
   SheetsSelectionsService,
   UniverSheetsCorePreset,
@@ -21,12 +22,19 @@ import { Messages } from "./messages";
 import { parameterHelp } from "./parameter-help";
 import { repairFormulaEngine } from "./repairs";
 import { gridFunction, namespace } from "./sheath-function";
+import { Tables, type SheetTable } from "./tables";
 import { applyAccent } from "./theme";
 
 export interface Grid {
   api: FUniver;
-  workbook: FWorkbook;
-  contents: Contents;
+  /** Another one after another book was opened, as are its contents. */
+  readonly workbook: FWorkbook;
+  readonly contents: Contents;
+  readonly tables: Tables;
+  /** Shows another book in place of this one, which is gone with all that could be undone in it. */
+  open(data: IWorkbookData, tables: readonly SheetTable[]): void;
+  /** Calls back after another book was opened. */
+  onOpened(listener: () => void): void;
   /** Calls back after every change of the selected cell or of the sheet shown. */
   onSelection(listener: () => void): () => void;
   /** Calls back after every calculation. */
@@ -40,7 +48,13 @@ export interface Grid {
 }
 
 /** A spreadsheet grid with its formula bar in `container`, knowing every bound function; nothing else of its kind. */
-export function createGrid(container: HTMLElement, functions: Functions, data: IWorkbookData, darkMode: boolean): Grid {
+export function createGrid(
+  container: HTMLElement,
+  functions: Functions,
+  data: IWorkbookData,
+  tablesOfData: readonly SheetTable[],
+  darkMode: boolean,
+): Grid {
   repairFormulaEngine();
   const messages = new Messages();
   const univer = new Univer({
@@ -55,13 +69,20 @@ export function createGrid(container: HTMLElement, functions: Functions, data: I
     else univer.registerPlugin(plugin);
   }
   const api = FUniver.newAPI(univer);
-  nameParts(container, api);
   const drawn = untilDrawn(api);
-  univer.createUnit(UniverInstanceType.UNIVER_SHEET, data);
-
-  const workbook = api.getActiveWorkbook()!;
-  const contents = new Contents(workbook, injector.get(FormulaDataModel), messages);
-  showOwnMessages(injector.get(CellAlertManagerService), workbook, contents);
+  // Some parts come later than the first picture.
+  void drawn.then(() => nameParts(container));
+  api.addEvent(api.Event.LifeCycleChanged, () => nameParts(container));
+  const tables = new Tables(injector.get(ISuperTableService));
+  const opened: (() => void)[] = [];
+  const show = (data: IWorkbookData, tablesOfData: readonly SheetTable[]) => {
+    tables.set(data.id, tablesOfData);
+    univer.createUnit(UniverInstanceType.UNIVER_SHEET, data);
+    const workbook = api.getActiveWorkbook()!;
+    return { workbook, contents: new Contents(workbook, injector.get(FormulaDataModel), messages) };
+  };
+  let shown = show(data, tablesOfData);
+  showOwnMessages(injector.get(CellAlertManagerService), () => shown);
   api.onBeforeCommandExecute(({ id }) => {
     if (id === SetFormulaCalculationStartMutation.id) messages.startRun();
   });
@@ -69,8 +90,19 @@ export function createGrid(container: HTMLElement, functions: Functions, data: I
   const selections = injector.get(SheetsSelectionsService);
   return {
     api,
-    workbook,
-    contents,
+    get workbook() {
+      return shown.workbook;
+    },
+    get contents() {
+      return shown.contents;
+    },
+    tables,
+    open(data, tablesOfData) {
+      api.disposeUnit(shown.workbook.getId());
+      shown = show(data, tablesOfData);
+      opened.forEach((listener) => listener());
+    },
+    onOpened: (listener) => void opened.push(listener),
     onSelection(listener) {
       const watched = [
         selections.selectionMoveEnd$.subscribe(() => listener()),
