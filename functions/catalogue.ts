@@ -7,6 +7,7 @@ import { ionMix } from "./ion-mix/entries";
 import { layer } from "./layer/entries";
 import { magnetised } from "./magnetised/entries";
 import { negativeIons } from "./negative-ions/entries";
+import { probe } from "./probe/entries";
 import { rf } from "./rf/entries";
 import { wall } from "./wall/entries";
 
@@ -23,6 +24,7 @@ export const families: readonly Family[] = [
   ionMix,
   electrons,
   magnetised,
+  probe,
   checks.family,
   helpers,
 ];

@@ -6,6 +6,7 @@ import * as ionMix from "./ion-mix/functions";
 import * as layer from "./layer/functions";
 import * as magnetised from "./magnetised/functions";
 import * as negativeIons from "./negative-ions/functions";
+import * as probe from "./probe/functions";
 import * as rf from "./rf/functions";
 import * as wall from "./wall/functions";
 
@@ -22,6 +23,7 @@ export const frontDoors: Readonly<Record<string, FrontDoor>> = Object.fromEntrie
   ionMix,
   electrons,
   magnetised,
+  probe,
   checks,
   helpers,
 ]

@@ -29,6 +29,7 @@ export const BT59 = source("BT59", "Boyd & Thompson, Proc. R. Soc. A 252 (1959) 
 export const BHC09 = source("BHC09", "Baalrud, Hegna & Callen, Phys. Rev. Lett. 103 (2009) 205002");
 export const C82 = source("C82", "Chodura, Phys. Fluids 25 (1982) 1628");
 export const C03 = source("C03", "Chen, Langmuir Probe Diagnostics, IEEE-ICOPS mini-course (2003)");
+export const MSL26 = source("MSL26", "Mott-Smith & Langmuir, Phys. Rev. 28 (1926) 727");
 export const GUM = source("GUM", "JCGM 100:2008, Guide to the expression of uncertainty in measurement");
 export const GUM1 = source("GUM1", "JCGM 101:2008, Propagation of distributions using a Monte Carlo method");
 export const CODATA = source("CODATA", "CODATA 2022 recommended values of the fundamental physical constants");

@@ -37,8 +37,8 @@ export function generator(seed: number) {
 
 /** Γ at the arguments the moments need. */
 const gammaAt: Record<number, number> = {
-  0.25: 3.6256099082219083,
-  0.75: 1.2254167024651777,
+  0.25: 3.625609908221908,
+  0.75: 1.2254167024651776,
   1: 1,
   1.25: 0.9064024770554771,
   0.5: Math.sqrt(Math.PI),
