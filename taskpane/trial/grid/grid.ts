@@ -15,7 +15,7 @@ import {
 import english from "@univerjs/preset-sheets-core/locales/en-US";
 import type { Cell } from "../../workbook/address";
 import type { Functions } from "../host";
-import { nameParts } from "./accessible-names";
+import { keepPartsNamed } from "./accessible-names";
 import { Contents } from "./contents";
 import { showOwnMessages } from "./error-popup";
 import { Messages } from "./messages";
@@ -69,10 +69,8 @@ export function createGrid(
     else univer.registerPlugin(plugin);
   }
   const api = FUniver.newAPI(univer);
+  keepPartsNamed(container);
   const drawn = untilDrawn(api);
-  // Some parts come later than the first picture.
-  void drawn.then(() => nameParts(container));
-  api.addEvent(api.Event.LifeCycleChanged, () => nameParts(container));
   const tables = new Tables(injector.get(ISuperTableService));
   const opened: (() => void)[] = [];
   const show = (data: IWorkbookData, tablesOfData: readonly SheetTable[]) => {
@@ -99,6 +97,7 @@ export function createGrid(
     tables,
     open(data, tablesOfData) {
       api.disposeUnit(shown.workbook.getId());
+      messages.forgetAll();
       shown = show(data, tablesOfData);
       opened.forEach((listener) => listener());
     },

@@ -18,6 +18,11 @@ export class Messages {
     this.run++;
   }
 
+  /** For another book, whose sheets may go by the same ids. */
+  forgetAll(): void {
+    this.sheets.clear();
+  }
+
   keep(sheet: string, row: number, column: number, result: unknown[][]): void {
     const cells = this.sheets.get(sheet) ?? new Map<string, Calculated>();
     this.sheets.set(sheet, cells);
