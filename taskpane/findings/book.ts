@@ -39,6 +39,16 @@ export class Sheet {
     return this.content.formulas[row - this.row]?.[column - this.column];
   }
 
+  /** Every formula, row by row. Rows may be of very different lengths, and most of them empty. */
+  *formulas(): Generator<{ row: number; column: number; formula: string }> {
+    for (const [i, cells] of this.content.formulas.entries()) {
+      for (let j = 0; j < cells.length; j++) {
+        const formula = cells[j];
+        if (formula !== undefined) yield { row: this.row + i, column: this.column + j, formula };
+      }
+    }
+  }
+
   /** What the formula in this cell fills, the cell itself included; undefined where it fills no other. */
   spill(row: number, column: number): Area | undefined {
     return this.spillAt.get(pack(row, column));

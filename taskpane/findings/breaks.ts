@@ -28,19 +28,20 @@ export async function noteBreaks(
     noted.add(cell);
     noteBreak(looking, sheet, found, place);
   };
-  for (let column = sheet.column; column < sheet.columns; column++) {
-    const items = span(sheet.row, sheet.rows, (row) => itemAt(looking, sheet, row, column));
+  const { columns, rows } = extents(sheet);
+  for (const [column, extent] of columns) {
+    const items = span(extent, (row) => itemAt(looking, sheet, row, column));
     for (const found of breaksIn(items)) {
-      const row = sheet.row + found.at;
+      const row = extent.from + found.at;
       const beside = [column - 1, column + 1].map((each) => itemAt(looking, sheet, row, each));
       note(found, { row, column }, () => beside.some((each) => isLike(items[found.at], each)));
     }
     await pace();
   }
-  for (let row = sheet.row; row < sheet.rows; row++) {
-    const items = span(sheet.column, sheet.columns, (column) => itemAt(looking, sheet, row, column));
+  for (const [row, extent] of rows) {
+    const items = span(extent, (column) => itemAt(looking, sheet, row, column));
     for (const found of breaksIn(items)) {
-      const column = sheet.column + found.at;
+      const column = extent.from + found.at;
       const beside = [row - 1, row + 1].map((each) => itemAt(looking, sheet, each, column));
       const isTyped = (each: Item) => each !== undefined && "typed" in each;
       note(found, { row, column }, () =>
@@ -51,8 +52,41 @@ export async function noteBreaks(
   }
 }
 
-function span(from: number, to: number, at: (i: number) => Item): Item[] {
-  return Array.from({ length: Math.max(0, to - from) }, (_, i) => at(from + i));
+interface Extent {
+  from: number;
+  to: number;
+  formulas: number;
+}
+
+/** A run and its break have at least this many formulas. */
+const fewest = 3;
+
+/** From the first formula to the last, in every column and row that has enough of them. */
+function extents(sheet: Sheet): { columns: Map<number, Extent>; rows: Map<number, Extent> } {
+  const columns = new Map<number, Extent>();
+  const rows = new Map<number, Extent>();
+  for (const { row, column } of sheet.formulas()) {
+    extend(columns, column, row);
+    extend(rows, row, column);
+  }
+  for (const lines of [columns, rows])
+    for (const [line, { formulas }] of lines) if (formulas < fewest) lines.delete(line);
+  return { columns, rows };
+}
+
+function extend(lines: Map<number, Extent>, line: number, at: number): void {
+  const extent = lines.get(line);
+  if (!extent) {
+    lines.set(line, { from: at, to: at, formulas: 1 });
+    return;
+  }
+  extent.from = Math.min(extent.from, at);
+  extent.to = Math.max(extent.to, at);
+  extent.formulas++;
+}
+
+function span({ from, to }: Extent, at: (i: number) => Item): Item[] {
+  return Array.from({ length: to - from + 1 }, (_, i) => at(from + i));
 }
 
 function itemAt(looking: Recalculation, sheet: Sheet, row: number, column: number): Item {

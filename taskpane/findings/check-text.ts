@@ -4,7 +4,7 @@ import type { Fill } from "./fill";
 import type { Tally } from "./tally";
 
 /** What a failing check begins with: "fails: …", or the count of a summary, "2 of 12 fail: …". */
-const failing = /^(?:fails|\d+ of \d+ fails?)(?::\s*(.*))?$/is;
+const failing = /^(?:fails:\s*(.*)|\d+ of \d+ fails?\b.*)$/is;
 
 /** Notes cells of a check that say it fails, with the reason they give. */
 export function noteFailingChecks(
@@ -21,7 +21,7 @@ export function noteFailingChecks(
       tally
         .draft(`check|${fill.id}`, () => ({ cause: "check", sheet: fill.sheet, what: "the check fails" }))
         .in(fill, [name], () => fill.cells.length)
-        .add(cellAt(i, j), () => (cell as string).trim());
+        .add(cellAt(i, j), () => found[1] ?? found[0]);
     }),
   );
 }

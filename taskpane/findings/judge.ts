@@ -48,7 +48,7 @@ function filledRows(result: Cells, { rows, columns }: Shape): number {
   return count;
 }
 
-type Origin = FoundError["from"] & { code: string };
+export type Origin = FoundError["from"] & { code: string };
 
 /** Where error cells of results come from, by the error itself: a message does not travel from cell to cell. */
 export class Traces {

@@ -52,17 +52,15 @@ export async function look(content: WorkbookContent, { progress, signal, kept }:
   const book = new Book(content);
   const looking = new Recalculation(book);
   const pace = pacer(progress, signal);
-  const rows = book.sheets.reduce((sum, sheet) => sum + sheet.rows - sheet.row, 1);
-  let done = 0;
+  const rows = book.sheets.reduce((sum, sheet) => sum + sheet.rows, 1);
+  let before = 0;
   for (const sheet of book.sheets) {
-    for (let row = sheet.row; row < sheet.rows; row++, done++) {
-      for (let column = sheet.column; column < sheet.columns; column++) {
-        const formula = sheet.formula(row, column);
-        if (formula === undefined || !ours.test(formula)) continue;
-        looking.look(sheet, row, column, formula);
-        await pace((0.9 * done) / rows);
-      }
+    for (const { row, column, formula } of sheet.formulas()) {
+      if (!ours.test(formula)) continue;
+      looking.look(sheet, row, column, formula);
+      await pace((0.9 * (before + row)) / rows);
     }
+    before += sheet.rows;
   }
   for (const fill of looking.fills.values()) {
     noteHeadings(book, fill, looking.tally);

@@ -8,14 +8,17 @@ import { fingerprint } from "./fingerprint";
 export interface Facts {
   cause: Cause;
   sheet: string;
-  what: string;
-  /** What tells it from others of its cause in the same column; `what` itself where it never changes. */
+  /** In words; where they depend on all that is found, they are asked for at the end. */
+  what: string | ((draft: Draft) => string);
+  /** What tells it from others of its cause in the same column; `what` itself where that never changes. */
   subject?: string;
 }
 
 /** What is being found of one kind in one place; cells are added as they are met. */
 export class Draft {
   readonly cells: Packed[] = [];
+  /** Where it comes from, when that is other cells. */
+  readonly origins: Packed[] = [];
   private readonly met = new Set<Packed>();
   private readonly functions = new Set<string>();
   private readonly looked = new Map<number, () => number>();
@@ -34,6 +37,11 @@ export class Draft {
     return this;
   }
 
+  from(cell: Packed): this {
+    this.origins.push(cell);
+    return this;
+  }
+
   /** Adds a cell, each one once; the detail kept is that of the worst, of the first among equals. */
   add(cell: Packed, detail?: () => string, badness = 0): void {
     if (this.met.has(cell)) return;
@@ -48,8 +56,9 @@ export class Draft {
   }
 
   finding(key: string): Finding {
-    const { cause, sheet, what } = this.facts;
+    const { cause, sheet } = this.facts;
     const { cell, detail } = this.worst!;
+    const what = this.what;
     const cells = rangesText(rectanglesOf(sheet, this.cells), Infinity);
     return {
       key,
@@ -66,6 +75,11 @@ export class Draft {
     };
   }
 
+  private get what(): string {
+    const { what } = this.facts;
+    return typeof what === "string" ? what : what(this);
+  }
+
   /** Cells of several fills have no number in common to be counted against. */
   private get outOf(): number {
     const [first] = this.looked.values();
@@ -74,7 +88,7 @@ export class Draft {
 
   /** What stays the same when rows are added or numbers change. */
   get identity(): string {
-    const { cause, sheet, what, subject = what } = this.facts;
+    const { cause, sheet, subject = this.what } = this.facts;
     return [cause, sheet, unpack(this.cells[0]).column, subject].join("|");
   }
 }

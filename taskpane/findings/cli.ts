@@ -1,0 +1,52 @@
+/**
+ * The findings of saved workbooks, on the command line: npm run findings -- book.xlsx. Ends with 0 where there is
+ * nothing open, 1 where there is, and 2 where a file cannot be looked through.
+ */
+import { readFileSync, statSync } from "node:fs";
+import { basename, resolve } from "node:path";
+import { fileWorkbook, limits, Unreadable } from "../workbook/file";
+import { openOf, readAccepted } from "./accepted";
+import { look } from "./look";
+import { textReport } from "./text-report";
+
+const files = process.argv.slice(2).filter((argument) => !argument.startsWith("-"));
+
+if (files.length === 0) {
+  console.error("Which workbook? npm run findings -- book.xlsx");
+  process.exitCode = 2;
+}
+for (const file of files) process.exitCode = Math.max(Number(process.exitCode ?? 0), await findingsOf(file));
+
+async function findingsOf(file: string): Promise<0 | 1 | 2> {
+  try {
+    const workbook = fileWorkbook(bytesOf(file));
+    const found = await look(await workbook.read(), { progress: showProgress });
+    const accepted = await readAccepted(workbook);
+    console.log(textReport(basename(file), found, accepted));
+    return openOf(found.findings, accepted).length > 0 ? 1 : 0;
+  } catch (error) {
+    console.error(`${file} cannot be looked through: ${whyNot(error)}.`);
+    return 2;
+  }
+}
+
+/** The folder that npm was called in, which is not always the one it runs scripts in. */
+function bytesOf(file: string): Uint8Array {
+  const path = resolve(process.env.INIT_CWD ?? ".", file);
+  if (statSync(path).size > limits.file)
+    throw new Unreadable(`it is larger than the ${limits.file / 2 ** 20} MiB that are read`);
+  return readFileSync(path);
+}
+
+function whyNot(error: unknown): string {
+  const code = (error as { code?: string }).code;
+  if (code === "ENOENT") return "there is no such file";
+  if (code === "EISDIR") return "it is a folder";
+  return error instanceof Error ? error.message : String(error);
+}
+
+/** Where somebody watches, in one line that goes away again. */
+function showProgress(done: number): void {
+  if (process.stderr.isTTY)
+    process.stderr.write(done < 1 ? `\rLooking through: ${Math.floor(100 * done)} %` : "\r\u001b[K");
+}
