@@ -91,7 +91,7 @@ function judgeDoubts({ cellAt, fill, call, tally, entry }: Judged, input: Input,
   const { cells, area } = arg;
   for (let i = 0; i < cells.length; i++) {
     for (let j = 0; j < cells[i].length; j++) {
-      const doubt = doubtOf(input, cells[i][j]);
+      const doubt = isRefused(input, cells[i][j]) ? undefined : doubtOf(input, cells[i][j]);
       if (doubt === undefined) continue;
       const [amount, hint] = doubt.split("; ");
       const subject = `${input.quantity?.name ?? input.kind}; ${hint}`;
@@ -104,6 +104,11 @@ function judgeDoubts({ cellAt, fill, call, tally, entry }: Judged, input: Input,
         .add(area ? pack(area.row + i, area.column + j) : cellAt(i, j), () => amount);
     }
   }
+}
+
+/** A number outside the input's range is an error already. */
+function isRefused({ kind, least, most }: Input, cell: unknown): boolean {
+  return kind === "quantity" && typeof cell === "number" && (cell < least || cell > most);
 }
 
 /**

@@ -3,9 +3,14 @@ import { mkdirSync, writeFileSync } from "node:fs";
 import os from "node:os";
 import { cells } from "./cells";
 import { checks } from "./checks";
+import { findings } from "./findings";
 import type { Row } from "./measure";
 
-const sections: Record<string, () => Row[] | Promise<Row[]>> = { "Coming through cells": cells, Checks: checks };
+const sections: Record<string, () => Row[] | Promise<Row[]>> = {
+  "Coming through cells": cells,
+  Checks: checks,
+  "Looking through workbooks": findings,
+};
 
 const wanted = process.argv[2]?.toLowerCase();
 const report: Record<string, Row[]> = {};
