@@ -18,7 +18,7 @@ export function layOut(sheets: readonly OpeningSheet[], dark: boolean): IWorkboo
   };
 }
 
-/** Rows from 0: the title, two lines of text, settings, then the table with three rows of heading. */
+/** Rows from 0: the title, two lines of text, settings, then the tables with three or four rows of heading. */
 const settingsRow = 3;
 const settingsInARow = 4;
 const titleHeight = 30;
@@ -29,8 +29,9 @@ const spareColumnWidth = 100;
 const rowHeight = 22;
 
 function rowsOf(sheet: OpeningSheet) {
-  const band = settingsRow + Math.ceil(sheet.settings.length / settingsInARow);
-  return { band, heading: band + 1, unit: band + 2, first: band + 3, last: band + 2 + sheet.rows };
+  const group = settingsRow + Math.ceil(sheet.settings.length / settingsInARow);
+  const band = group + (sheet.columns.some((column) => column.group) ? 1 : 0);
+  return { group, band, heading: band + 1, unit: band + 2, first: band + 3, last: band + 2 + sheet.rows };
 }
 
 type Looks = ReturnType<typeof looksFor>;
@@ -78,7 +79,7 @@ function cellsOf(sheet: OpeningSheet, looks: Looks): Cells["data"] {
   for (let row = 0; row < rowsOf(sheet).band; row++) sheet.columns.forEach((_, at) => cells.put(row, at, "head"));
   cells.put(0, 0, "title", sheet.title);
   sheet.about.forEach((line, i) => cells.put(1 + i, 0, "about", line));
-  sheet.settings.forEach((setting, i) => putSetting(cells, setting, i));
+  sheet.settings.forEach((_, i) => putSetting(cells, sheet, i));
   sheet.columns.forEach((_, at) => putColumn(cells, sheet, at));
   return cells.data;
 }
@@ -88,44 +89,83 @@ function settingCell(i: number): [row: number, column: number] {
   return [settingsRow + Math.floor(i / settingsInARow), 3 * (i % settingsInARow) + 3];
 }
 
-function putSetting(cells: Cells, { label, value, format }: Setting, i: number): void {
+function putSetting(cells: Cells, sheet: OpeningSheet, i: number): void {
+  const { label, value, format } = sheet.settings[i];
   const [row, column] = settingCell(i);
   cells.put(row, column - 1, "label", label);
-  cells.put(row, column, "typed", value, format);
+  const isWords = format === "words";
+  if (typeof value === "function")
+    cells.put(row, column, isWords ? "words" : "calculated", value(inRows(sheet, 0)), isWords ? undefined : format);
+  else cells.put(row, column, "typed", value, format);
 }
 
 function putColumn(cells: Cells, sheet: OpeningSheet, at: number): void {
   const column = sheet.columns[at];
-  const { band, heading, unit, first } = rowsOf(sheet);
+  if (column.gap) return;
+  const { group, band, heading, unit, first } = rowsOf(sheet);
+  if (column.group) cells.put(group, at, "group", column.group);
   cells.put(band, at, "band", bandOver(sheet.columns, at));
   cells.put(heading, at, column.format === "words" ? "wordsHeading" : "heading", column.heading);
   cells.put(unit, at, "unit", column.unit);
-  const look = column.typed ? "typed" : column.format === "words" ? "words" : "calculated";
-  const pattern = column.format === "words" ? undefined : column.format;
-  for (let i = 0; i < sheet.rows; i++) cells.put(first + i, at, look, contentInRow(sheet, column, i), pattern);
+  for (let i = 0; i < rowsIn(sheet, column); i++) {
+    const { look, pattern } = lookInRow(column, i);
+    cells.put(first + i, at, look, contentInRow(sheet, column, i), pattern);
+  }
+}
+
+function lookInRow({ titled, typed, format }: Column, i: number): { look: Look; pattern?: string } {
+  if (titled && i === 0) return { look: "heading" };
+  const own = typeof format === "function" ? format(i) : format;
+  const isWords = own === "words";
+  return { look: typed ? "typed" : isWords ? "words" : "calculated", pattern: isWords ? undefined : own };
 }
 
 /** The word over the first of neighbouring columns that are all typed or all calculated. */
 function bandOver(columns: readonly Column[], at: number): string | undefined {
   const isTyped = (i: number) => columns[i]?.typed !== undefined;
-  if (at > 0 && isTyped(at) === isTyped(at - 1)) return undefined;
+  if (at > 0 && !columns[at - 1].gap && isTyped(at) === isTyped(at - 1)) return undefined;
   return isTyped(at) ? "Typed in" : "Calculated";
+}
+
+function rowsIn(sheet: OpeningSheet, { rows }: Column): number {
+  return rows ?? sheet.rows;
 }
 
 function contentInRow(sheet: OpeningSheet, column: Column, i: number): CellValue | undefined {
   if (column.typed) return column.typed[i];
-  if (column.each) return column.each(addresses(sheet, (letter, first) => `${letter}${first + i}`));
-  if (column.fills && i === 0)
-    return column.fills(addresses(sheet, (letter, first, last) => `${letter}${first}:${letter}${last}`));
-  return undefined;
+  const own = column.each?.(inRow(sheet, i), i, (other) => inRow(sheet, other), inRows(sheet, 0));
+  if (own !== undefined) return own;
+  const every = column.every ?? rowsIn(sheet, column);
+  return column.fills && i % every === 0 ? column.fills(inRows(sheet, i, column.every)) : undefined;
 }
 
-function addresses(sheet: OpeningSheet, ofColumn: (letter: string, first: number, last: number) => string): Addresses {
-  const { first, last } = rowsOf(sheet);
-  const columns = sheet.columns.map(({ key }, at) => [key, ofColumn(columnLetters(at), first + 1, last + 1)]);
-  const settings = sheet.settings.map(({ key }, i) => {
-    const [row, column] = settingCell(i);
-    return [key, `$${columnLetters(column)}$${row + 1}`];
+/** The cells of one row. */
+function inRow(sheet: OpeningSheet, i: number): Addresses {
+  return addresses(sheet, (letter, first) => `${letter}${first + i}`);
+}
+
+/** The columns as ranges: so many of their rows, or all. */
+function inRows(sheet: OpeningSheet, from: number, count?: number): Addresses {
+  return addresses(sheet, (letter, first, rows) => {
+    const start = first + from;
+    return `${letter}${start}:${letter}${start + (count ?? rows) - 1}`;
   });
-  return Object.fromEntries([...columns, ...settings]);
+}
+
+function addresses(sheet: OpeningSheet, ofColumn: (letter: string, first: number, rows: number) => string): Addresses {
+  const { first } = rowsOf(sheet);
+  const columns = sheet.columns.map((column, at) => [
+    column.key,
+    ofColumn(columnLetters(at), first + 1, rowsIn(sheet, column)),
+  ]);
+  return { ...Object.fromEntries(columns), ...settingAddresses(sheet.settings) };
+}
+
+function settingAddresses(settings: readonly Setting[]): Addresses {
+  return Object.fromEntries(
+    settings.map(({ key }, i) => {
+      const [row, column] = settingCell(i);
+      return [key, `$${columnLetters(column)}$${row + 1}`];
+    }),
+  );
 }

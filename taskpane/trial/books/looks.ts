@@ -35,7 +35,8 @@ const dark: Palette = {
   typedGround: "#2c2129",
 };
 
-export type Look = "head" | "title" | "about" | "label" | "band" | Heading | "unit" | "typed" | "calculated" | "words";
+export type Look =
+  "head" | "title" | "about" | "label" | "group" | "band" | Heading | "unit" | "typed" | "calculated" | "words";
 type Heading = "heading" | "wordsHeading";
 
 /** How the cells of the opening sheets look. Typed cells have slanted figures and a dotted frame beside their tint. */
@@ -53,6 +54,7 @@ export function looksFor(isDark: boolean): Record<Look, IStyleData> {
     title: { ...text, ...bare, fs: 14, bl: BooleanNumber.TRUE },
     about: { ...aside, ...bare },
     label: { ...aside, ...bare, ...right },
+    group: { ...text, ...bare, bl: BooleanNumber.TRUE },
     band: { ...aside, ...bare, fs: 9, bd: { b: border(BorderStyleTypes.THIN, line) } },
     heading: { ...heading, ...right },
     wordsHeading: heading,

@@ -22,22 +22,34 @@ export interface Setting {
   key: string;
   /** With its unit: "Wafer area, cm²". */
   label: string;
-  value: CellValue;
+  /** What is typed in, or the formula that works it out. */
+  value: CellValue | ((range: Addresses) => string);
+  /** Number format; "words" for text, which may reach over empty cells to its right. */
   format?: string;
 }
 
 export interface Column {
   key: string;
   heading: string;
+  /** The title over this column and those to its right, up to the next title or gap. */
+  group?: string;
+  /** An empty column that keeps two tables apart. */
+  gap?: true;
+  /** As many rows as the sheet has, unless given. */
+  rows?: number;
   unit?: string;
   /** Pixels; 74 unless given. */
   width?: number;
-  /** Number format; "words" for a column of text. */
-  format?: string;
+  /** Number format, of all rows or of each; "words" for text. */
+  format?: string | ((i: number) => string);
   /** Values typed in, one a row; undefined leaves a cell empty. */
   typed?: readonly (CellValue | undefined)[];
   /** One formula in the first row that fills the column, and columns to its right that declare no content. */
   fills?: (range: Addresses) => string;
-  /** Ordinary cell arithmetic: a formula in every row. */
-  each?: (cell: Addresses) => string;
+  /** Such a formula again after so many rows, over those rows only. */
+  every?: number;
+  /** Whether the first row that is filled is a row of titles. */
+  titled?: true;
+  /** Ordinary cell arithmetic or text in every row, or in some; with the cells of another row, and with whole columns. */
+  each?: (cell: Addresses, i: number, row: (i: number) => Addresses, range: Addresses) => string | undefined;
 }
