@@ -5,7 +5,6 @@ import { frontDoors } from "../../functions/front-doors";
 import type { Row } from "./measure";
 
 export async function findings(): Promise<Row[]> {
-  await timed(workbook(2_000, false));
   const half = await timed(workbook(50_000, false));
   const repeated = await timed(workbook(100_000, false));
   const distinct = await timed(workbook(20_000, true));
@@ -18,13 +17,24 @@ export async function findings(): Promise<Row[]> {
 }
 
 function growth(value: number): Row {
-  return { what: "100,000 formulas against 50,000", value, unit: "× the time", claim: "≤ 2.6: linear", holds: value <= 2.6 };
+  return {
+    what: "100,000 formulas against 50,000",
+    value,
+    unit: "× the time",
+    claim: "≤ 2.6: linear",
+    holds: value <= 2.6,
+  };
 }
 
+/** The quickest of some: what else the machine does, and the compiler's first time, must not count. */
 async function timed(content: WorkbookContent): Promise<number> {
-  const start = performance.now();
-  await look(content);
-  return performance.now() - start;
+  let least = Infinity;
+  for (let i = 0; i < 4; i++) {
+    const start = performance.now();
+    await look(content);
+    least = Math.min(least, performance.now() - start);
+  }
+  return least;
 }
 
 /** A sheet with nothing the matter: two inputs and a call in every row. */
