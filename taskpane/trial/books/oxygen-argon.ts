@@ -201,7 +201,7 @@ const measured: Column[] = [
   },
   {
     key: "error",
-    heading: "Error",
+    heading: "95 % bound",
     width: 84,
     rows: 5,
     format: (i) => readings[i].format.replace("0.000E", "0.0E"),
