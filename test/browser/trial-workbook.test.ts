@@ -57,6 +57,7 @@ describe("the pane's way to the cells", () => {
 
   test("makes a sheet, replaces all that stood in it, and leaves the others and the view alone", async () => {
     const page = await openTrial();
+    const tabs = await page.getByRole("tab").allInnerTexts();
     const before = await readSheet(page);
     await page.evaluate(async () => {
       await window.wallfallWorkbook.replaceSheet("Findings", [["a", 1, "b"], ["c"], ["=1+1"]]);
@@ -65,7 +66,7 @@ describe("the pane's way to the cells", () => {
     const made = await readSheet(page, "Findings");
     expect([made.values, made.formulas]).toEqual([[["d", 2]], [[undefined, undefined]]]);
     expect(await readSheet(page)).toEqual(before);
-    expect(await page.getByRole("tab").allInnerTexts()).toEqual(["Pre-clean", "Findings"]);
+    expect(await page.getByRole("tab").allInnerTexts()).toEqual([...tabs, "Findings"]);
     expect(await page.getByRole("tab", { selected: true }).innerText()).toBe("Pre-clean");
   });
 
@@ -104,7 +105,12 @@ describe("by keyboard", () => {
     const page = await openTrial();
     await page.evaluate(() => window.wallfallWorkbook.replaceSheet("Second", [["here"]]));
     await page.getByRole("tab", { name: "Pre-clean" }).focus();
+    // From the first tab leftward is the last one.
+    await page.keyboard.press("ArrowLeft");
+    await expect.poll(() => page.getByRole("tab", { selected: true }).innerText()).toBe("Second");
     await page.keyboard.press("ArrowRight");
+    await expect.poll(() => page.getByRole("tab", { selected: true }).innerText()).toBe("Pre-clean");
+    await page.keyboard.press("End");
     await expect.poll(() => page.getByRole("tab", { selected: true }).innerText()).toBe("Second");
     await expectStatus(page, "A1", "here");
   });

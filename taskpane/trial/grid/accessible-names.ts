@@ -1,5 +1,10 @@
 /** Names for what the grid leaves nameless, and its canvases out of the order of the Tab key: they lead nowhere. */
-export function nameParts(container: HTMLElement): void {
+export function keepPartsNamed(container: HTMLElement): void {
+  // Parts come late, and some only for a while.
+  new MutationObserver(() => nameParts(container)).observe(container, { childList: true, subtree: true });
+}
+
+function nameParts(container: HTMLElement): void {
   const all = (selector: string) => [...container.querySelectorAll(selector)];
   set(all("input[type=text]"), { "aria-label": "Address of the selected cell" });
   set(all("a[aria-haspopup=dialog]"), { role: "button", "aria-label": "Defined names" });
