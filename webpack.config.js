@@ -9,6 +9,7 @@ import { allowVendor, fromVendor, hostLibrary, readOffice } from "./manifest/bui
 import { IconsPlugin } from "./manifest/build/icons.js";
 import { Licences } from "./manifest/build/licences.js";
 import { policy, PolicyPlugin } from "./manifest/build/policy.js";
+import { SamplesPlugin } from "./manifest/build/samples.js";
 import { SizePlugin } from "./manifest/build/size.js";
 import { ManifestPlugin, readOrigin } from "./manifest/build/stamp.js";
 
@@ -109,6 +110,7 @@ export default (env = {}) => {
         ],
       }),
       new IconsPlugin(),
+      new SamplesPlugin(),
       new ManifestPlugin({ origin, version, id: env.id, name: env.name }),
       new PolicyPlugin(hosted ? allowVendor(policy) : policy),
       licences.lister(),

@@ -44,7 +44,7 @@ async function keptWork() {
 }
 
 const comeBack = {
-  left: (title: string) => `“${title}” is open as you left it. The opening example is under More.`,
+  left: (title: string) => `“${title}” is open as you left it. The opening example is under Other workbooks.`,
   copy: (title: string) => `“${title}” is open in another tab too. This is a copy of it with changes of its own.`,
 };
 

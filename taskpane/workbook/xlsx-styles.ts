@@ -151,13 +151,13 @@ export function readStyles(styles: string | undefined, theme: string | undefined
       attributes.formatCode,
     ]),
   );
-  const fonts = childrenOf(child(sheet, "fonts"), "font").map((font) => readFont(font, colours));
+  const fonts = childrenOf(child(sheet, "fonts"), "font").map((font, _, [usual]) => readFont(font, usual, colours));
   const fills = childrenOf(child(sheet, "fills"), "fill").map((fill) => readFill(fill, colours));
   const borders = childrenOf(child(sheet, "borders"), "border").map((border) => readBorders(border, colours));
   return childrenOf(child(sheet, "cellXfs"), "xf").map((xf): FileStyle => {
     const { numFmtId, fontId, fillId, borderId } = xf.attributes;
     const id = Number(numFmtId ?? 0);
-    const font = Number(fontId ?? 0) === 0 ? {} : fonts[Number(fontId)];
+    const font = fonts[Number(fontId ?? 0)];
     return clean({
       format: formats.get(id) ?? fixedFormats[id],
       ...font,
@@ -172,17 +172,21 @@ function clean<T extends object>(facts: T): T {
   return Object.fromEntries(Object.entries(facts).filter(([, value]) => value !== undefined)) as T;
 }
 
-function readFont(font: Element, colours: readonly string[]): FileStyle {
+/** What a font adds to the usual one of the file: its name and size go without saying. */
+function readFont(font: Element, usual: Element, colours: readonly string[]): FileStyle {
   const isOn = (name: string) => {
     const found = child(font, name);
     return found && !/^(0|false|none)$/.test(found.attributes.val ?? "") ? true : undefined;
   };
+  const valueOf = (of: Element, name: string) => child(of, name)?.attributes.val;
+  const unlessUsual = (name: string) =>
+    valueOf(font, name) === valueOf(usual, name) ? undefined : valueOf(font, name);
   return {
     bold: isOn("b"),
     italic: isOn("i"),
     underlined: isOn("u"),
-    size: Number(child(font, "sz")?.attributes.val) || undefined,
-    font: child(font, "name")?.attributes.val,
+    size: Number(unlessUsual("sz")) || undefined,
+    font: unlessUsual("name"),
     colour: readColour(child(font, "color"), colours),
   };
 }

@@ -44,7 +44,7 @@ export function mountFiles(places: Places, grid: Grid, keeper: Keeper, openingEx
     grid.open(data, tables);
     await keeper.begin(title, true);
     notice.say(
-      [`“${title}” is open.`, leftOut(book.leftOut), hadWork && "Your earlier work is under More."]
+      [`“${title}” is open.`, leftOut(book.leftOut), hadWork && "Your earlier work is under Other workbooks."]
         .filter(Boolean)
         .join(" "),
     );
@@ -76,7 +76,7 @@ export function mountFiles(places: Places, grid: Grid, keeper: Keeper, openingEx
         const { data, tables } = openingExample();
         grid.open(data, tables);
         await keeper.begin("Opening example", false);
-        notice.say("The opening example is back as it was at first. Your own work is under More.");
+        notice.say("The opening example is back as it was at first. Your own work is under Other workbooks.");
       }),
     openEarlier: (id) =>
       attempt(notice, "", async () => {

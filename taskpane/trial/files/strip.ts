@@ -33,7 +33,7 @@ export function makeStrip(actions: Actions): { element: HTMLElement; showKeeping
   const more = h(
     "button",
     { type: "button", "aria-expanded": "false", "aria-controls": "more", click: () => void toggle(list.hidden) },
-    "More",
+    "Other workbooks",
   );
   const toggle = async (open: boolean) => {
     if (open) list.replaceChildren(...offers(actions, await actions.earlier(), () => void toggle(false)));
