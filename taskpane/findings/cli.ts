@@ -4,7 +4,9 @@
  */
 import { readFileSync, statSync } from "node:fs";
 import { basename, resolve } from "node:path";
-import { fileWorkbook, limits, Unreadable } from "../workbook/file";
+import { fileWorkbook } from "../workbook/file";
+import { FileProblem } from "../workbook/xlsx-book";
+import { mostPacked, tooLarge } from "../workbook/xlsx-unpack";
 import { openOf, readAccepted } from "./accepted";
 import { look } from "./look";
 import { textReport } from "./text-report";
@@ -25,7 +27,7 @@ async function findingsOf(file: string): Promise<0 | 1 | 2> {
     console.log(textReport(basename(file), found, accepted));
     return openOf(found.findings, accepted).length > 0 ? 1 : 0;
   } catch (error) {
-    console.error(`${file} cannot be looked through: ${whyNot(error)}.`);
+    console.error(`${file} cannot be looked through. ${whyNot(error)}`);
     return 2;
   }
 }
@@ -33,15 +35,15 @@ async function findingsOf(file: string): Promise<0 | 1 | 2> {
 /** The folder that npm was called in, which is not always the one it runs scripts in. */
 function bytesOf(file: string): Uint8Array {
   const path = resolve(process.env.INIT_CWD ?? ".", file);
-  if (statSync(path).size > limits.file)
-    throw new Unreadable(`it is larger than the ${limits.file / 2 ** 20} MiB that are read`);
+  const { size } = statSync(path);
+  if (size > mostPacked) throw new FileProblem(tooLarge(size));
   return readFileSync(path);
 }
 
 function whyNot(error: unknown): string {
   const code = (error as { code?: string }).code;
-  if (code === "ENOENT") return "there is no such file";
-  if (code === "EISDIR") return "it is a folder";
+  if (code === "ENOENT") return "There is no such file.";
+  if (code === "EISDIR") return "It is a folder.";
   return error instanceof Error ? error.message : String(error);
 }
 

@@ -99,7 +99,7 @@ class Reader {
       if (!cell) continue;
       if (++this.cells > mostCells)
         throw new FileProblem(
-          `The file has more than ${mostCells.toLocaleString("en")} cells, too many for the trial sheet.`,
+          `The file has more than ${mostCells.toLocaleString("en")} cells, too many to be read here.`,
         );
       (cells[place.row] ??= [])[place.column] = cell;
     }
@@ -153,6 +153,7 @@ const unreadParts: Record<string, string> = {
   "/comments": "notes",
   "/threadedcomments": "notes",
   "vbaproject.bin": "macros",
+  "/macrosheets/": "macros",
   "/externallinks/": "links to other workbooks",
   "/slicers/": "slicers",
 };

@@ -2,7 +2,7 @@ import { unzipSync } from "fflate";
 import { FileProblem } from "./xlsx-book";
 
 /** More than any workbook that the trial sheet can hold; beyond, the page would run out of memory. */
-const mostPacked = 60e6;
+export const mostPacked = 60e6;
 const mostUnpacked = 600e6;
 
 /** The parts of a workbook file by their names; those that are not XML are named, and stay packed. */
@@ -53,6 +53,6 @@ function oldOrLocked(bytes: Uint8Array): string {
 const binary = "The file is a binary workbook (.xlsb). Save it as .xlsx in your spreadsheet, and open that.";
 const noWorkbook = "The file isn't an .xlsx workbook. Open it in a spreadsheet, save it as .xlsx, and open that.";
 
-function tooLarge(size: number): string {
-  return `The file is too large for the trial sheet: ${Math.round(size / 1e6)} MB.`;
+export function tooLarge(size: number): string {
+  return `The file is too large to be read here: ${Math.round(size / 1e6)} MB.`;
 }

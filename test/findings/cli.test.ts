@@ -59,14 +59,14 @@ test(
   async () => {
     const macros = await findings(withParts(saved(cathode), { "xl/vbaProject.bin": new Uint8Array(9) }));
     expect(macros).toMatchObject({ code: 2, untouched: true });
-    expect(macros.said).toMatch(/book\.xlsx cannot be looked through: it carries macros/);
+    expect(macros.said).toMatch(/book\.xlsx cannot be looked through\. The file carries macros/);
     const huge = join(folder, "huge.xlsx");
     writeFileSync(huge, "PK");
     truncateSync(huge, 2 ** 27);
     const missing = join(folder, "missing.xlsx");
     const { said, code } = await run(huge, missing);
-    expect(said).toMatch(/huge\.xlsx cannot be looked through: it is larger than the 100 MiB that are read/);
-    expect(said).toMatch(/missing\.xlsx cannot be looked through: there is no such file/);
+    expect(said).toMatch(/huge\.xlsx cannot be looked through\. The file is too large to be read here: 134 MB/);
+    expect(said).toMatch(/missing\.xlsx cannot be looked through\. There is no such file/);
     expect(code).toBe(2);
     expect(await run()).toEqual({ said: "Which workbook? npm run findings -- book.xlsx\n", code: 2 });
   },
