@@ -34,6 +34,11 @@ export interface Limit<V extends readonly unknown[] = any> {
   /** What is wrong when it fails, in one sentence: "the sheath is thicker than the ion mean free path". */
   reason: string;
   source: Source;
+  /**
+   * Set where the model stands on this assumption, as Child's law on free fall: while it could not be tested, others that
+   * hold don't make the model hold.
+   */
+  decisive?: true;
 }
 
 /** The measure needs an input that was left blank. */

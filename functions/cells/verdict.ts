@@ -58,7 +58,11 @@ function telling(limit: Limit, value: number, word: Word): string {
   return format(value, digits);
 }
 
-const rank: Record<Word, number> = { fails: 3, marginal: 2, holds: 1, "not tested": 0 };
+/** What could not be tested says nothing against the model, unless it is what the model stands on. */
+function severity({ limit, word }: Verdict): number {
+  if (word === "not tested") return limit.decisive ? 2 : 0;
+  return word === "fails" ? 4 : word === "marginal" ? 3 : 1;
+}
 
 /** The worst of several verdicts, the first of its kind. */
 export function worst(verdicts: readonly Verdict[]): Verdict | undefined {
@@ -76,7 +80,7 @@ export function worstOf(entry: Entry<any>, values: readonly unknown[]): Verdict 
 }
 
 function worse(found: Verdict | undefined, next: Verdict): Verdict {
-  return found === undefined || rank[next.word] > rank[found.word] ? next : found;
+  return found === undefined || severity(next) > severity(found) ? next : found;
 }
 
 /** A model that has no solution fails, with the reason its own message gives. */

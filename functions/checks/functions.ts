@@ -14,7 +14,7 @@ export enum UncertaintyMethod {
 }
 
 /**
- * Whether a function may be believed at these inputs, row by row: the worst of "fails", "doubtful input", "marginal", "holds" and "not tested", in that order, with the reason.
+ * Whether a function may be believed at these inputs, row by row: the worst of "fails", "doubtful input", "marginal", "holds" and "not tested", in that order, with the reason. "not tested" comes before "holds" where it concerns what the model stands on.
  * @customfunction LIMITCHECK
  * @helpurl https://localhost:3000/taskpane.html#LIMITCHECK
  * @param function_name Name of the function to check, as text.

@@ -9,7 +9,8 @@ import { unsolved, verdictText, worstOf } from "../cells/verdict";
 import { functionIn, isEntry, tooManyInputs, type Directory } from "./directory";
 
 /**
- * The worst verdict of a named function at each row of inputs: fails, then doubtful input, marginal, holds, not tested.
+ * The worst verdict of a named function at each row of inputs: fails, then doubtful input, marginal, holds, not tested;
+ * what the model stands on counts before holds where it was not tested.
  * A failing row with a doubtful input tells both, since the one often causes the other.
  */
 export function limitCheck(directory: Directory, names: Cells, args: readonly unknown[]): Result {

@@ -52,6 +52,35 @@ export const OHMICDROP = entry("OHMICDROP", {
   ],
 });
 
+/** A function that stands on one limit, the path, and has another that is easily met. */
+export const FREEFALL = entry("FREEFALL", {
+  ...facts,
+  inputs: [quantityInput("V", quantities.voltage), optional(quantityInput("path", quantities.length))],
+  result: quantities.energy,
+  compute: (V) => V,
+  limits: [
+    {
+      assumption: "the voltage is high",
+      measure: "V/V",
+      value: (V) => V,
+      holds: 30,
+      fails: 3,
+      reason: "the voltage is low",
+      source: CP,
+    },
+    {
+      assumption: "nothing is in the way",
+      measure: "path/m",
+      value: (_V, path) => path ?? new NotTested("path"),
+      holds: 3,
+      fails: 1,
+      reason: "something is in the way",
+      source: CP,
+      decisive: true,
+    },
+  ],
+});
+
 export const NOLIMITS = entry("NOLIMITS", {
   ...facts,
   inputs: [quantityInput("x", quantities.number)],

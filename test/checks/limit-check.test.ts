@@ -2,7 +2,7 @@ import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { LIMITCHECK } from "../../functions/checks/functions";
 import { limitCheck } from "../../functions/checks/limit-check";
-import { directoryOf, NOLIMITS, OHMICDROP } from "./fakes";
+import { directoryOf, FREEFALL, NOLIMITS, OHMICDROP } from "./fakes";
 
 const directory = directoryOf(OHMICDROP, NOLIMITS);
 const column = (...cells: unknown[]) => cells.map((cell) => [cell]);
@@ -19,6 +19,20 @@ describe("one verdict", () => {
 
   test("a limit that holds outranks one that could not be tested", () => {
     expect(one(1e16, 5)).toBe("holds");
+  });
+
+  test("what a model stands on outranks a limit that holds while it could not be tested, and no other verdict", () => {
+    const fall = (...cells: unknown[]) =>
+      limitCheck(
+        directoryOf(FREEFALL),
+        [["FREEFALL"]],
+        cells.map((cell) => [[cell]]),
+      )[0][0];
+    expect(fall(300)).toBe("not tested: give path");
+    expect(fall(300, 4)).toBe("holds");
+    expect(fall(20)).toBe("marginal: V/V 20 (30…3)");
+    expect(fall(1)).toMatch(/^fails: the voltage is low/);
+    expect(fall(300, 0.5)).toMatch(/^fails: something is in the way/);
   });
 
   test("a measure just short of a bound is told in digits that show it", () => {
