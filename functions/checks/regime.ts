@@ -103,9 +103,9 @@ function sheathWidth({ n_e, T_e, ion, T_i, V_s }: Situation): Measure {
 /** As given, or from the pressure of the ion's own gas at 300 K where its cross-section is known. */
 function ionPath({ ion, p, lambda_i }: Situation): Measure {
   if (lambda_i !== undefined) return lambda_i;
-  if (p === undefined) return new NotTested("p");
   const sigma = (crossSections as Record<string, number | undefined>)[ion.label.replace(/\+$/, "")];
-  return sigma === undefined ? new NotTested("lambda_i") : meanFreePath(p, sigma, 300);
+  if (sigma === undefined) return new NotTested("lambda_i");
+  return p === undefined ? new NotTested("p") : meanFreePath(p, sigma, 300);
 }
 
 /** Of an ion at the Bohm speed. */

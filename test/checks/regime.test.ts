@@ -45,6 +45,7 @@ describe("the regime of a plasma and its wall", () => {
 
   test("needs the mean free path where the ion's own gas has no cross-section here", () => {
     expect(verdicts(1e16, 3, "N2+", 0.7, undefined, 300)[0]).toBe("not tested: give lambda_i");
+    expect(verdicts(1e16, 3, "N2+", undefined, undefined, 300)[0]).toBe("not tested: give lambda_i");
     expect(verdicts(1e16, 3, "N2+", 0.7, undefined, 300, undefined, undefined, undefined, 0.1)[0]).toBe("holds");
   });
 
