@@ -39,7 +39,11 @@ export const SHEATHWIDTH = entry("SHEATHWIDTH", {
     except: { model: ["full"] },
   },
   limits: [
-    limits.electronFree((V_s, _n_edge, T_e, word) => (word === "full" ? undefined : [V_s, T_e])),
+    limits.electronFree(
+      (V_s, _n_edge, T_e, word) => (word === "child" || word === "collisional" ? [V_s, T_e] : undefined),
+      '; model "full" counts them, for ions that fall freely',
+    ),
+    limits.electronsSwept((V_s, _n_edge, T_e, word) => (word === "matrix" ? [V_s, T_e] : undefined)),
     ...limits.pathSuits((V_s, n_edge, T_e, word, lambda_i) => {
       if (word === "matrix") return undefined;
       const s = width(V_s, n_edge, T_e, word, lambda_i);
@@ -123,6 +127,7 @@ export const WALLFIELD = entry("WALLFIELD", {
   twin: { steps: [edgeDebyeLength, drop, fieldAtWall], formula: "E" },
   limits: [
     limits.noFieldEmission((V_s, n_edge, T_e, u_ratio) => model.wallField(Math.abs(V_s), n_edge, T_e, u_ratio)),
+    limits.fallsFreely(fullWidth),
     inDebyeSphere,
   ],
   sources: [R91, LL],
@@ -139,6 +144,7 @@ export const SHEATHPOTENTIAL = entry("SHEATHPOTENTIAL", {
   twin: "the distance is an integral over the potential, and its inverse takes iteration",
   limits: [
     limits.insideSheath((x, V_s, n_edge, T_e, u_ratio) => [x, V_s, n_edge, T_e, u_ratio]),
+    limits.fallsFreely((_x, V_s, n_edge, T_e) => fullWidth(V_s, n_edge, T_e)),
     manyInDebyeSphere((_x, _V_s, n_edge, T_e) => [n_edge, T_e]),
   ],
   sources: [R91],
@@ -177,6 +183,7 @@ export const SHEATHPROFILE = entry("SHEATHPROFILE", {
   twin: "the distance is an integral over the potential",
   limits: [
     limits.noFieldEmission((V_s, n_edge, T_e, u_ratio) => model.wallField(Math.abs(V_s), n_edge, T_e, u_ratio)),
+    limits.fallsFreely(fullWidth),
     inDebyeSphere,
   ],
   sources: [R91, LL],
@@ -191,6 +198,7 @@ export const IONTRANSITTIME = entry("IONTRANSITTIME", {
   compute: (V_s, s, ion) => model.ionTransitTime(Math.abs(V_s), s, ion),
   equation: String.raw`\tau_i = 3 s \sqrt{\frac{M}{2 Z e V_s}}`,
   twin: { formula: "3*s*SQRT(M/(2*Z*e*ABS(V_s)))" },
+  limits: [limits.fallsFreely((_V_s, s) => s)],
   sources: [LL],
   changes: first,
   example: [300, 1e-3, "Ar+"],
@@ -206,7 +214,7 @@ export const SHEATHCAPACITANCE = entry("SHEATHCAPACITANCE", {
     steps: [edgeDebyeLength, drop, fieldAtWall],
     formula: "e*n_edge/E*(1/SQRT(1+2*eta/u_ratio^2)-EXP(-eta))",
   },
-  limits: [inDebyeSphere],
+  limits: [limits.ionsKeepUp(), inDebyeSphere],
   sources: [R91],
   changes: first,
   example: [300, 1e16, 3],
@@ -231,6 +239,7 @@ export const PULSEDWIDTH = entry("PULSEDWIDTH", {
     limits.electronFree((V_s, _n_edge, T_e) => [V_s, T_e]),
     limits.electronsHaveLeft((_V_s, n_edge, _T_e, _ion, t) => 2 * Math.PI * plasmaFrequency(n_edge, m_e, 1) * t),
     limits.uncoveredIonsCount((V_s, n_edge, T_e, ion, t) => [V_s, n_edge, T_e, ion, t]),
+    limits.fallsFreely((V_s, n_edge, T_e, ion, t) => model.pulsedWidth(Math.abs(V_s), n_edge, T_e, ion, t)),
     inDebyeSphere,
   ],
   sources: [L89J],
@@ -308,6 +317,12 @@ function widthFor(
 ): number | Fault {
   if (word === "collisionless") return model.widthFromCurrent(Math.abs(V_s), J, ion);
   return lambda_i === undefined ? missingPath() : model.collisionalWidthFromCurrent(Math.abs(V_s), J, ion, lambda_i);
+}
+
+/** The width of the nonlinear solution entered at u_B, close enough for a mean free path; undefined where it has none. */
+function fullWidth(V_s: number, n_edge: number, T_e: number): number | undefined {
+  const V = Math.abs(V_s);
+  return V / T_e < bohmEnd ? undefined : model.fullWidth(V, n_edge, T_e);
 }
 
 /** A limit looks at a width only where there is one. */

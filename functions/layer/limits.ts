@@ -9,19 +9,41 @@ import { dropAt, dropAtEnd } from "./nonlinear-sheath";
 
 type Of<T> = (...values: any[]) => T;
 
+type Drop = [V_s: number, T_e: number];
+
 /** Child over full width is 0.26 at V_s/T_e = 5, 0.52 at 30, 0.69 at 100, 0.90 at 1000: recomputed. */
-export function electronFree(of: Of<[V_s: number, T_e: number] | undefined>): Limit {
+export function electronFree(of: Of<Drop | undefined>, advice = ""): Limit {
   return {
     assumption: "the sheath holds no electrons to speak of",
     measure: "V_s/T_e",
-    value: (...values) => {
-      const given = of(...values);
-      return given && Math.abs(given[0]) / given[1];
-    },
+    value: dropInTemperatures(of),
     holds: 300,
     fails: 30,
-    reason: 'electrons fill half of the sheath, which is far wider than this law says; take model "full"',
+    reason: `electrons fill half of the sheath, which is far wider than this law says${advice}`,
     source: LL,
+  };
+}
+
+/**
+ * Where the ions are still as dense as at the edge, Boltzmann electrons leave the wall the charge of a width
+ * λ_D √(2(η − 1 + e^(−η))), η = V_s/T_e: 2 % below the matrix width at 30, 17 % at 3.
+ */
+export function electronsSwept(of: Of<Drop | undefined>): Limit {
+  return {
+    assumption: "the voltage has swept the electrons out",
+    measure: "V_s/T_e",
+    value: dropInTemperatures(of),
+    holds: 30,
+    fails: 3,
+    reason: "so low a voltage leaves electrons in the matrix sheath",
+    source: LL,
+  };
+}
+
+function dropInTemperatures(of: Of<Drop | undefined>): Limit["value"] {
+  return (...values) => {
+    const given = of(...values);
+    return given && Math.abs(given[0]) / given[1];
   };
 }
 
@@ -42,13 +64,9 @@ export function pathSuits(of: Of<Motion | undefined>): [Limit, Limit] {
     }) satisfies Limit["value"];
   return [
     {
-      assumption: "ions cross the sheath without a collision",
-      measure: "λ_i/s",
+      ...freeFall,
       value: ratio("collisionless"),
-      holds: 3,
-      fails: 1,
-      reason: 'ions collide inside the sheath; take model "collisional"',
-      source: LL,
+      reason: `${freeFall.reason}; take model "collisional"`,
     },
     {
       assumption: "ions collide many times in the sheath",
@@ -58,8 +76,31 @@ export function pathSuits(of: Of<Motion | undefined>): [Limit, Limit] {
       fails: equalLaws,
       reason: `beyond λ_i/s = ${format(equalLaws)} the collisional law gives more current than free fall; take the collisionless one`,
       source: LL,
+      decisive: true,
     },
   ];
+}
+
+const freeFall = {
+  assumption: "ions cross the sheath without a collision",
+  measure: "λ_i/s",
+  holds: 3,
+  fails: 1,
+  reason: "ions collide inside the sheath",
+  source: LL,
+  decisive: true,
+} as const;
+
+/** Functions of free fall that take no mean free path say which one it takes, at their own width where they know one. */
+export function fallsFreely(of: Of<number | undefined>): Limit {
+  return {
+    ...freeFall,
+    value: (...values) => {
+      const s = of(...values);
+      const least = s === undefined ? "3 widths of the sheath" : `${format(freeFall.holds * s)} m`;
+      return new NotTested(`the ions' mean free path (MEANFREEPATH), which should be ${least} or more`);
+    },
+  };
 }
 
 /** A mean free path below λ_D takes the ions' energy before they are through the edge of the sheath. */
@@ -110,6 +151,22 @@ export function justFormed(isMatrix: Of<boolean>): Limit {
     fails: 3,
     reason: "the ions have begun to leave, and the sheath has grown",
     source: L89J,
+    decisive: true,
+  };
+}
+
+/** With the ions at rest the electrons' edge alone moves, dV = s dE: ε₀/s, against the ε₀/(3s) of a Child sheath. */
+export function ionsKeepUp(): Limit {
+  return {
+    assumption: "the voltage changes so slowly that the ions keep up",
+    measure: "f/f_pi",
+    value: () =>
+      new NotTested("the frequency, which should be a tenth of the ions' plasma frequency (PLASMAFREQUENCY) or less"),
+    holds: 0.1,
+    fails: 0.3,
+    reason: "the ions stay where they are, and the capacitance is up to three times as large",
+    source: LL,
+    decisive: true,
   };
 }
 

@@ -5,9 +5,17 @@ import { quantities } from "../cells/quantities";
 import { manyInDebyeSphere } from "../edge/limits";
 import { coldBohmSpeed, edgeDebyeLength } from "../edge/twins";
 import { missingPath } from "../layer/inputs";
+import { fallsFreely } from "../layer/limits";
 import { ionMotions, ionTransitTime } from "../layer/model";
 import { BB68, GE62, L88, L89, LL } from "../sources";
-import { highVoltage, manyPeriodsInTransit, neverReverses, pathSuitsRf, repelsAtTheTop } from "./limits";
+import {
+  highVoltage,
+  ionsFeelTheMean,
+  manyPeriodsInTransit,
+  neverReverses,
+  pathSuitsRf,
+  repelsAtTheTop,
+} from "./limits";
 import * as model from "./model";
 import { logBesselI0, ratioOfAmplitude } from "./twins";
 
@@ -44,6 +52,7 @@ export const IONENERGYSPREAD = entry("IONENERGYSPREAD", {
   limits: [
     manyPeriodsInTransit((V_dc, _V_rf, s, f, ion) => f * ionTransitTime(Math.abs(V_dc), s, ion)),
     neverReverses((V_dc, V_rf) => [V_rf, V_dc]),
+    fallsFreely((_V_dc, _V_rf, s) => s),
   ],
   sources: [BB68],
   changes: first,
@@ -65,7 +74,7 @@ export const RFCHILDCURRENT = entry("RFCHILDCURRENT", {
       'IF(model="collisionless",200/243*eps0*SQRT(2*Z*e/M)*ABS(V_dc)^(3/2)/s_m^2,IF(lambda_i="",NA(),' +
       `${model.collisionalCoefficient}*eps0*SQRT(2*Z*e/M)*ABS(V_dc)^(3/2)*SQRT(lambda_i)/s_m^(5/2)))`,
   },
-  limits: pathSuitsRf((_V_dc, s_m, _ion, word, lambda_i) => [word, s_m, lambda_i]),
+  limits: [...pathSuitsRf((_V_dc, s_m, _ion, word, lambda_i) => [word, s_m, lambda_i]), ionsFeelTheMean()],
   sources: [L88, L89],
   changes: first,
   example: [300, 0.005, "Ar+"],
@@ -81,7 +90,12 @@ export const RFSHEATHWIDTH = entry("RFSHEATHWIDTH", {
     steps: [edgeDebyeLength],
     formula: "SQRT(50/27)*SQRT(2)/3*lambda_D*(2*ABS(V_dc)/T_e)^(3/4)",
   },
-  limits: [highVoltage((V_dc, _n_edge, T_e) => [V_dc, T_e]), manyInDebyeSphere((_V_dc, n_edge, T_e) => [n_edge, T_e])],
+  limits: [
+    highVoltage((V_dc, _n_edge, T_e) => [V_dc, T_e]),
+    fallsFreely((V_dc, n_edge, T_e) => model.rfSheathWidth(Math.abs(V_dc), n_edge, T_e)),
+    ionsFeelTheMean(),
+    manyInDebyeSphere((_V_dc, n_edge, T_e) => [n_edge, T_e]),
+  ],
   sources: [L88],
   changes: first,
   example: [300, 1e16, 3],

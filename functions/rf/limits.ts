@@ -1,4 +1,4 @@
-import type { Limit } from "../cells/entry";
+import { NotTested, type Limit } from "../cells/entry";
 import { format } from "../cells/format";
 import { pathSuits, type Motion } from "../layer/limits";
 import { ionOfMass } from "../matter/ion";
@@ -72,6 +72,20 @@ export function highVoltage(of: Of<[V_dc: number, T_e: number]>): Limit {
     holds: 30,
     fails: 10,
     reason: "electrons fill a good part of the mean sheath, which the law leaves out",
+    source: L88,
+  };
+}
+
+/** The RF Child laws let ions fall through the mean potential. */
+export function ionsFeelTheMean(): Limit {
+  return {
+    assumption: "ions are too slow to follow the RF",
+    measure: "f/f_pi",
+    value: () =>
+      new NotTested("the frequency, which should be 3 times the ions' plasma frequency (PLASMAFREQUENCY) or more"),
+    holds: 3,
+    fails: 1,
+    reason: "ions follow the RF in part, and the sheath is that of the moment's voltage rather than of the mean",
     source: L88,
   };
 }

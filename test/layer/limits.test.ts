@@ -1,7 +1,9 @@
 import { describe, expect, test } from "vitest";
 import type { Entry } from "../../functions/cells/entry";
 import { judgeAll } from "../../functions/cells/verdict";
+import { LIMITCHECK } from "../../functions/checks/functions";
 import * as entries from "../../functions/layer/entries";
+import { SHEATHCAPACITANCE } from "../../functions/layer/functions";
 import { parseIon, type Ion } from "../../functions/matter/ion";
 
 const argon = parseIon("Ar+") as Ion;
@@ -15,8 +17,9 @@ describe("what SHEATHWIDTH assumes", () => {
     word(entries.SHEATHWIDTH, measure, assumption, ...inputs);
 
   test("the laws without electrons hold from 300 electron temperatures and fail below 30, of either sign", () => {
-    const free = (V_s: number, model = "child") => at("V_s/T_e", /electrons/, V_s, 1e16, 3, model, 1e-4);
+    const free = (V_s: number, model = "child") => at("V_s/T_e", /no electrons/, V_s, 1e16, 3, model, 1e-4);
     expect([900, 899, 90, 89].map((V_s) => free(V_s))).toEqual(["holds", "marginal", "marginal", "fails"]);
+    expect(free(900, "matrix")).toBeUndefined();
     expect(free(-900)).toBe("holds");
     expect(free(900, "collisional")).toBe("holds");
     expect(free(60, "full")).toBeUndefined();
@@ -46,6 +49,23 @@ describe("what SHEATHWIDTH assumes", () => {
   test("a path below the Debye length fails the collisional law", () => {
     const path = (lambda_i: number) => at("λ_i/λ_D", /Bohm/, 300, 1e16, 3, "collisional", lambda_i);
     expect([1.3e-4, 1.2e-4].map(path)).toEqual(["holds", "fails"]);
+  });
+
+  // Their charge by the first integral of Poisson's equation with uniform ions, ½E² = η − 1 + e^(−η).
+  test("the matrix width wants the electrons gone: 2 % of its charge is missing at 30 T_e, 17 % at 3", () => {
+    const charge = (eta: number) => Math.sqrt((eta - 1 + Math.exp(-eta)) / eta);
+    expect([30, 3].map((eta) => Math.round(100 * (1 - charge(eta))))).toEqual([2, 17]);
+    const swept = (V_s: number, model = "matrix") => at("V_s/T_e", /swept/, V_s, 1e16, 3, model, undefined);
+    expect([90, 89, 9, 8.9].map((V_s) => swept(V_s))).toEqual(["holds", "marginal", "marginal", "fails"]);
+    expect(swept(900, "child")).toBeUndefined();
+  });
+
+  test("no model holds while what it stands on is not tested: a path for free fall, a time for the matrix", () => {
+    const check = (...cells: unknown[]) => LIMITCHECK([["SHEATHWIDTH"]], ...cells.map((cell) => [[cell]]))[0][0];
+    expect(check(3000, 1e16, 3)).toBe("not tested: give lambda_i");
+    expect(check(3000, 1e16, 3, "full")).toBe("not tested: give lambda_i");
+    expect(check(3000, 1e16, 3, "matrix")).toBe("not tested: give t to PULSEDWIDTH");
+    expect(check(3000, 1e16, 3, "child", 0.1)).toBe("holds");
   });
 
   test("the matrix width asks for the time, which only PULSEDWIDTH takes", () => {
@@ -96,12 +116,52 @@ test("a point beyond the sheath's end is not inside the sheath", () => {
   expect([4.6e-3, 4.7e-3, 7e-3].map(inside)).toEqual(["holds", "marginal", "fails"]);
 });
 
+describe("free fall where no path is asked for", () => {
+  /** The least path told, in widths of this sheath. */
+  const widths = (entry: Entry<any>, width: number, ...inputs: unknown[]) => {
+    const found = judgeAll(entry, inputs).find(({ limit }) => /without a collision/.test(limit.assumption))!;
+    expect(found.word).toBe("not tested");
+    return Number(/which should be ([\d.e-]+) m or more/.exec(found.needs!)![1]) / width;
+  };
+
+  // 4.64888 mm is the full width at 300 V, recomputed in test/published.
+  test("is named with the path it takes, three widths of the sheath", () => {
+    for (const entry of [entries.WALLFIELD, entries.SHEATHPROFILE]) {
+      expect(widths(entry, 4.64888e-3, 300, 1e16, 3, 1, 50, false)).toBeCloseTo(3, 1);
+    }
+    expect(widths(entries.SHEATHPOTENTIAL, 4.64888e-3, 1e-3, 300, 1e16, 3, 1)).toBeCloseTo(3, 1);
+    expect(widths(entries.IONTRANSITTIME, 1e-3, 300, 1e-3, argon)).toBeCloseTo(3, 1);
+    expect(widths(entries.PULSEDWIDTH, 0.014867, 2000, 1e15, 3, argon, 0)).toBeCloseTo(3, 1);
+  });
+
+  test("is asked for in widths where the drop is too small to have one", () => {
+    const [, path] = judgeAll(entries.WALLFIELD, [0.1, 1e16, 3, 1]);
+    expect(path.needs).toMatch(/3 widths of the sheath or more/);
+  });
+});
+
+test("a capacitance that ions have time to answer is a third of one that they have not: the frequency decides", () => {
+  const s = 3.22809e-3;
+  const atRest = 8.8541878e-12 / s;
+  expect(atRest / (SHEATHCAPACITANCE([[300]], [[1e16]], [[3]])[0][0] as number)).toBeCloseTo(2.8, 1);
+  expect(LIMITCHECK([["SHEATHCAPACITANCE"]], [[300]], [[1e16]], [[3]])[0][0]).toMatch(
+    /^not tested: give the frequency/,
+  );
+});
+
 describe("what PULSEDWIDTH assumes", () => {
   const at = (measure: string, t: number, V_s = 2000) =>
     word(entries.PULSEDWIDTH, measure, /./, V_s, 1e15, 3, argon, t);
 
   test("the electrons need ten periods of their plasma frequency to leave", () => {
     expect([0, 1e-10, 1e-9, 1e-8].map((t) => at("ω_pe t", t))).toEqual(["fails", "fails", "marginal", "holds"]);
+  });
+
+  test("a low voltage is not sent to a model that this function has not", () => {
+    const found = judgeAll(entries.PULSEDWIDTH, [60, 1e16, 3, argon, 1e-8]);
+    const [low] = found.filter(({ word }) => word === "fails");
+    expect(low.limit.reason).toMatch(/electrons fill/);
+    expect(low.limit.reason).not.toMatch(/model/);
   });
 
   test("between half the Child width and the steady state the inflow counts", () => {

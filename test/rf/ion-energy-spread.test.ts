@@ -1,6 +1,7 @@
 import fc from "fast-check";
 import { describe, expect, test } from "vitest";
 import { judgeAll } from "../../functions/cells/verdict";
+import { LIMITCHECK } from "../../functions/checks/functions";
 import { ionTransitTime } from "../../functions/layer/model";
 import { e, u } from "../../functions/matter/constants";
 import type { Ion } from "../../functions/matter/ion";
@@ -88,6 +89,11 @@ describe("IONENERGYSPREAD", () => {
   test("many periods hold, a transit within one period fails", () => {
     const word = (f: number) => judgeAll(entry, [300, 100, 0.005, f, argon])[0].word;
     expect([60e6, 13.56e6, 1e6].map(word)).toEqual(["holds", "holds", "fails"]);
+  });
+
+  test("collisions, which no input tells, keep it from holding: three widths is the path to have", () => {
+    const told = LIMITCHECK([["IONENERGYSPREAD"]], [[250]], [[250]], [["4 mm"]], [["13.56 MHz"]], [["Ar+"]]);
+    expect(told[0][0]).toMatch(/^not tested: give the ions' mean free path .* 0\.012 m or more$/);
   });
 
   test("the fundamental of a collisionless RF sheath, 1.208 V_dc, holds; twice the mean cannot be", () => {

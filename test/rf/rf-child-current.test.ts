@@ -1,5 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { judgeAll } from "../../functions/cells/verdict";
+import { LIMITCHECK } from "../../functions/checks/functions";
 import { eps0, e, u } from "../../functions/matter/constants";
 import type { Ion } from "../../functions/matter/ion";
 import { RFCHILDCURRENT as entry } from "../../functions/rf/entries";
@@ -58,12 +59,20 @@ describe("RFCHILDCURRENT", () => {
 
   test("each law is judged by the mean free path, and not at all without one", () => {
     const words = (word: string, path?: number) =>
-      judgeAll(entry, [300, 0.005, argon, word, path]).map((each) => each.word);
+      judgeAll(entry, [300, 0.005, argon, word, path])
+        .filter(({ limit }) => limit.measure === "λ_i/s_m")
+        .map((each) => each.word);
     expect(words("collisionless", 0.05)).toEqual(["holds"]);
     expect(words("collisionless", 0.001)).toEqual(["fails"]);
     expect(words("collisional", 4e-4)).toEqual(["holds"]);
     expect(words("collisional", 1e-3)).toEqual(["marginal"]);
     expect(words("collisional", 2e-3)).toEqual(["fails"]);
     expect(words("collisionless")).toEqual(["not tested"]);
+  });
+
+  test("what it takes of the frequency is told, and does not keep a law with its path from holding", () => {
+    const frequency = judgeAll(entry, [300, 0.005, argon, "collisionless", 0.05]).at(-1)!;
+    expect(frequency.needs).toMatch(/^the frequency, which should be 3 times the ions' plasma frequency/);
+    expect(LIMITCHECK([["RFCHILDCURRENT"]], [[300]], [[0.005]], [["Ar+"]], [[""]], [[0.05]])).toEqual([["holds"]]);
   });
 });

@@ -1,5 +1,6 @@
 import { describe, expect, test } from "vitest";
 import { judgeAll } from "../../functions/cells/verdict";
+import { LIMITCHECK } from "../../functions/checks/functions";
 import { RFSHEATHWIDTH as entry } from "../../functions/rf/entries";
 import { RFSHEATHWIDTH } from "../../functions/rf/functions";
 
@@ -19,5 +20,11 @@ describe("RFSHEATHWIDTH", () => {
   test("a drop of 30 T_e holds, one below 10 T_e fails", () => {
     const word = (V_dc: number) => judgeAll(entry, [V_dc, 1e16, 3])[0].word;
     expect([-90, 60, 20].map(word)).toEqual(["holds", "marginal", "fails"]);
+  });
+
+  test("a width for ions that fall freely names the path they need: three of it", () => {
+    const told = LIMITCHECK([["RFSHEATHWIDTH"]], [[250]], [[6e15]], [[3]])[0][0] as string;
+    const least = Number(/^not tested: give the ions' mean free path .* should be ([\d.]+) m or more/.exec(told)![1]);
+    expect(least / (RFSHEATHWIDTH([[250]], [[6e15]], [[3]])[0][0] as number)).toBeCloseTo(3, 1);
   });
 });
