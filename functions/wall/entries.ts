@@ -8,19 +8,19 @@ import { coldIons, manyInDebyeSphere } from "../edge/limits";
 import { presheathDrop } from "../edge/model";
 import { edgeDensity, electronSpeed, warmBohmSpeed } from "../edge/twins";
 import { e, eps0, k_B } from "../matter/constants";
+import { fallsFreely } from "../layer/limits";
 import type { Ion } from "../matter/ion";
 import { CP, D23, HW67, LL, S00, S54 } from "../sources";
 import { emissionLimit } from "./emission-limit";
 import { emissionYield } from "./emission-yield";
 import { formulaInput } from "./formula-input";
 import {
-  aboveGrazing,
   besideTheInputs,
   maxwellianTail,
   sheathLimits,
+  streamsAlongField,
   wallRepels,
   weakIonEmission,
-  weakIonEmissionFromMetal,
   type AtWall,
 } from "./limits";
 import * as model from "./model";
@@ -32,7 +32,7 @@ const closedForm = "closed form, 4 ulp";
 
 /** Blank stays undefined, so that a limit can say that emission was left out; the models then take 0. */
 const delta_e = optional(
-  quantityInput("delta_e", quantities.notNegative, { band: { low: 0, high: 1, above: "percent meant?" } }),
+  quantityInput("delta_e", quantities.notNegative, { band: { low: 0, high: 5, above: "percent meant?" } }),
 );
 /** Blank is normal incidence or no field at all: nothing to judge then. */
 const angle = optional(quantityInput("angle", quantities.angle));
@@ -40,6 +40,10 @@ const V_w = quantityInput("V_w", quantities.voltage);
 const V_wOrFloating = optional(quantityOrWord("V_w", quantities.voltage, ["floating"]), "floating" as const);
 const J = quantityInput("J", quantities.currentDensity);
 const work_function = quantityInput("work_function", quantities.workFunction);
+const unknownIonEmission = weakIonEmission(
+  "γ_i",
+  () => new NotTested("the yield of the wall's material (IONEMISSION)"),
+);
 
 export const FLOATINGPOTENTIAL = entry("FLOATINGPOTENTIAL", {
   inputs: [T_e, ionInput(), T_i, delta_e, optional(wordInput("from", model.referencePoints), "edge"), edge_ratio],
@@ -80,7 +84,7 @@ export const WALLFLUX = entry("WALLFLUX", {
     formula: "edge_ratio*n_bulk*u_B/Z*SIN(RADIANS(angle))",
   },
   limits: [
-    aboveGrazing((_n, T_e, ion, T_i, _ratio, angle) => ({ angle, T_e, ion, T_i })),
+    streamsAlongField((_n, T_e, ion, T_i, _ratio, angle) => ({ angle, T_e, ion, T_i })),
     coldIons((_n, _T_e, _ion, T_i) => T_i),
     manyInDebyeSphere((n_bulk, T_e, _ion, _T_i, edge_ratio) => [edge_ratio * n_bulk, T_e]),
   ],
@@ -137,7 +141,7 @@ export const WALLCURRENT = entry("WALLCURRENT", {
   },
   limits: [
     ...sheathLimits((V_w, _n, T_e, ion, T_i, _ratio, delta_e) => ({ V_w, T_e, ion, T_i, delta_e })),
-    weakIonEmissionFromMetal((_V_w, _n, _T_e, ion) => ion),
+    unknownIonEmission,
     manyInDebyeSphere((_V_w, n_bulk, T_e, _ion, _T_i, edge_ratio) => [edge_ratio * n_bulk, T_e]),
   ],
   sources: [LL, HW67],
@@ -172,7 +176,7 @@ export const WALLVOLTAGE = entry("WALLVOLTAGE", {
       T_i,
       delta_e,
     })),
-    weakIonEmissionFromMetal((_J, _n, _T_e, ion) => ion),
+    unknownIonEmission,
     manyInDebyeSphere((_J, n_bulk, T_e, _ion, _T_i, edge_ratio) => [edge_ratio * n_bulk, T_e]),
   ],
   sources: [LL, HW67],
@@ -207,6 +211,7 @@ export const IONIMPACTENERGY = entry("IONIMPACTENERGY", {
       ion,
       T_i,
     })),
+    fallsFreely(() => undefined),
     coldIons((_T_e, _ion, T_i) => T_i),
   ],
   sources: [LL],
@@ -253,7 +258,7 @@ export const WALLHEATFLUX = entry("WALLHEATFLUX", {
   },
   limits: [
     ...sheathLimits((_n, T_e, ion, T_i, V_w, _ratio, delta_e) => atWall(V_w, T_e, ion, T_i, delta_e)),
-    aboveGrazing((_n, T_e, ion, T_i, _V_w, _ratio, _delta, _surface, angle) => ({ angle, T_e, ion, T_i })),
+    streamsAlongField((_n, T_e, ion, T_i, _V_w, _ratio, _delta, _surface, angle) => ({ angle, T_e, ion, T_i })),
     manyInDebyeSphere((n_bulk, T_e, _ion, _T_i, _V_w, edge_ratio) => [edge_ratio * n_bulk, T_e]),
   ],
   sources: [S00],
@@ -424,7 +429,15 @@ export const IONEMISSION = entry("IONEMISSION", {
   compute: model.ionEmission,
   equation: String.raw`\gamma_i \approx 0.016\,(E_\mathrm{iz} - 2W) \ge 0, \qquad \text{energies in eV}`,
   twin: { formula: "MAX(0,0.016*(E_iz-2*work_function))" },
-  limits: [weakIonEmission("γ_i", model.ionEmission)],
+  limits: [
+    besideTheInputs("the impact energy of the ions (IONIMPACTENERGY), which should be 500 eV or less", {
+      assumption: "the ions set electrons free by their neutralisation alone",
+      measure: "E_i/eV",
+      holds: 500,
+      fails: 2000,
+      reason: "ions as fast as that set electrons free by their impact as well",
+    }),
+  ],
   sources: [LL],
   changes: first,
   example: [15.76, 4.5],

@@ -5,8 +5,8 @@ import { grazingLimit } from "../magnetised/model";
 import { m_e } from "../matter/constants";
 import type { Ion } from "../matter/ion";
 import { CP, HW67, LL, S12 } from "../sources";
-import { electronExcess, ionEmission } from "./model";
-import { firstExcitation, ionisationEnergy } from "./rare-gases";
+import { electronExcess } from "./model";
+import { firstExcitation } from "./rare-gases";
 
 /** What the limits look at: a wall at a potential, or at none where the model has no solution. */
 export interface AtWall {
@@ -62,7 +62,8 @@ function weakEmission(at: Look): Limit {
 
 /**
  * Electrons that reach the wall come from the tail above e|V_w|: where the gas takes their energy faster than they are
- * replaced, fewer arrive than a Maxwellian has. That it fails at twice the threshold is common practice.
+ * replaced, fewer arrive than a Maxwellian has. By how much hangs on the density of gas and electrons, which no input
+ * tells: from the first threshold on it is open. That the tail is gone beyond ten, as in thrusters, is common practice.
  */
 export function maxwellianTail(at: (...values: any[]) => Omit<AtWall, "delta_e">): Limit {
   return {
@@ -76,8 +77,8 @@ export function maxwellianTail(at: (...values: any[]) => Omit<AtWall, "delta_e">
         : undefined;
     },
     holds: 1,
-    fails: 2,
-    reason: "inelastic collisions deplete the electrons fast enough to reach the wall",
+    fails: 10,
+    reason: "collisions and the wall itself deplete the electrons fast enough to reach it",
     source: LL,
   };
 }
@@ -87,10 +88,16 @@ function electronsMatter({ V_w, T_e, ion, T_i }: Omit<AtWall, "delta_e">): boole
   return typeof V_w === "number" && electronExcess(T_e, ion, T_i ?? 0) * Math.exp(Math.min(0, V_w / T_e)) > 0.01;
 }
 
+interface AtAngle {
+  /** Undefined where no angle was given. */
+  angle: number | undefined;
+  T_e: number;
+  ion: Ion;
+  T_i: number | undefined;
+}
+
 /** In a strong field at an angle, the Debye sheath lives only above the grazing limit. */
-export function aboveGrazing(
-  of: (...values: any[]) => { angle: number | undefined; T_e: number; ion: Ion; T_i: number | undefined },
-): Limit {
+export function aboveGrazing(of: (...values: any[]) => AtAngle): Limit {
   return {
     assumption: "the field meets the wall steeply enough for a Debye sheath",
     measure: "angle/grazing limit",
@@ -106,8 +113,22 @@ export function aboveGrazing(
   };
 }
 
-/** Emission by the ions themselves adds to the current they carry. */
-export function weakIonEmission(measure: string, gamma: (...values: any[]) => number | undefined): Limit {
+/**
+ * Below the grazing limit the Debye sheath is gone, but not the stream along the field, S12: it fails where sin θ comes
+ * down to √(m/M), a third of that limit, common practice.
+ */
+export function streamsAlongField(of: (...values: any[]) => AtAngle): Limit {
+  return {
+    ...aboveGrazing(of),
+    assumption: "particles reach the wall by streaming along the field",
+    holds: 1,
+    fails: 0.3,
+    reason: "at such a grazing angle drifts, gyration and the wall's roughness decide what reaches it",
+  };
+}
+
+/** Emission by the ions themselves adds to the current they carry; `gamma` is their yield, or what is missing to know it. */
+export function weakIonEmission(measure: string, gamma: Limit["value"]): Limit {
   return {
     assumption: "emission by ion impact is small beside the ion current",
     measure,
@@ -117,14 +138,6 @@ export function weakIonEmission(measure: string, gamma: (...values: any[]) => nu
     reason: "the electrons that ions set free carry a large share of the current",
     source: LL,
   };
-}
-
-/** Where only the ion is known, its yield on a clean metal of 4.5 eV, tungsten say, stands in. */
-export function weakIonEmissionFromMetal(ion: (...values: any[]) => Ion): Limit {
-  return weakIonEmission("γ_i on a metal of 4.5 eV", (...values) => {
-    const energy = ionisationEnergy(ion(...values));
-    return energy === undefined ? undefined : ionEmission(energy, 4.5);
-  });
 }
 
 /** An assumption that no input of the function can test: the user is told what to look at. */
