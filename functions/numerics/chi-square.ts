@@ -1,7 +1,7 @@
 /**
- * Probability that a χ² of so many degrees of freedom exceeds x, within 0.005 and, down to 1e-5, an eighth of itself: the cube root of χ²/ν is
- * nearly normal (Wilson & Hilferty, Proc. Natl. Acad. Sci. 17 (1931) 684), and the normal tail follows Abramowitz & Stegun
- * 7.1.26.
+ * Probability that a χ² of so many degrees of freedom exceeds x, within 0.005 and, down to 1e-5, an eighth of itself: the
+ * cube root of χ²/ν is nearly normal (Wilson & Hilferty, Proc. Natl. Acad. Sci. 17 (1931) 684), and the normal tail follows
+ * Abramowitz & Stegun 7.1.26.
  */
 export function chiSquareBeyond(x: number, freedom: number): number {
   const spread = 2 / (9 * freedom);

@@ -4,6 +4,8 @@ export interface Characteristic {
   I: Float64Array;
   /** How many readings each point is the mean of. */
   count: Float64Array;
+  /** Variance of the mean of many neighbours over that of as many independent readings; 1 unless said. */
+  likeness?: number;
 }
 
 /** A sweep put in order, and what that took. */

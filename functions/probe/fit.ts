@@ -1,6 +1,7 @@
 import { NormalEquations } from "../numerics/normal-equations";
 import { variance } from "../numerics/noise";
 import type { Characteristic } from "./characteristic";
+import { likeness } from "./correlation";
 import { firstLook } from "./knee";
 import { covarianceOf, electronsAt, floatingPotentialOf, gradientAt, ionsAt, type RetardingFit } from "./retarding-fit";
 import { kneeOf, type Knee } from "./saturation";
@@ -21,6 +22,8 @@ export interface ProbeResult {
   knee?: Knee;
   window: readonly [from: number, to: number];
   points: number;
+  /** Why the errors are wider than the scatter of the readings makes them. */
+  widened: string[];
 }
 
 export interface Floating {
@@ -37,13 +40,27 @@ export interface Floating {
 
 const fewest = 12;
 
+/** What the model may be off by, in parts of the current: no characteristic follows it closer, few as loosely. */
+const close = 1e-3;
+const loose = 1e-2;
+
+/** The points where ions alone arrive, several T below the last crossing of zero. */
+function ionSideEnd({ V, I }: Characteristic, { T }: { T: number }): number {
+  let zero = I.length - 1;
+  while (zero > 0 && I[zero] > 0) zero--;
+  return V.findIndex((each) => each > V[zero] - 3 * T);
+}
+
 /** The result of one sweep, or in words why there is none. */
 export function fitCharacteristic(curve: Characteristic): ProbeResult | string {
   const points = curve.V.length;
   if (points < fewest) return `only ${points} usable points; a fit needs at least ${fewest}`;
   const look = firstLook(curve);
   if (!look) return notRising;
-  const fit = chooseWindow(curve, look);
+  const alike = likeness(curve, ionSideEnd(curve, look), look.T, close);
+  const weighed = { ...curve, likeness: alike };
+  const closely = chooseWindow(weighed, look, close);
+  const fit = typeof closely === "string" ? chooseWindow(weighed, look, loose) : closely;
   if (typeof fit === "string") return fit;
   const T_e = { value: fit.parameters[3], error: Math.sqrt(fit.covariance[15]) };
   return {
@@ -52,6 +69,10 @@ export function fitCharacteristic(curve: Characteristic): ProbeResult | string {
     knee: kneeOf(curve, fit, look.knee),
     window: [fit.lowest, fit.V_0],
     points: fit.to - fit.from,
+    widened: [
+      ...(alike > 1 ? ["neighbouring readings are alike, as a filter makes them"] : []),
+      ...(fit === closely ? [] : [`the current is an exponential to ${100 * loose} % only`]),
+    ],
   };
 }
 

@@ -83,7 +83,7 @@ function remarksOn(
   ion: Ion | undefined,
 ): string[] {
   const { T_e, floating, knee } = result;
-  const remarks: string[] = [];
+  const remarks = result.widened.map((why) => `${why}: errors widened`);
   if (!floating)
     remarks.push("the current never crosses zero: no V_f, I_sat and density; sweep further down, or mend an offset");
   if (!knee) {

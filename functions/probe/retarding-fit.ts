@@ -23,9 +23,6 @@ export interface RetardingFit {
   variances: Float64Array;
 }
 
-/** No characteristic follows the model closer than this, in parts of the current. */
-const modelError = 1e-3;
-
 /** Current of the electrons at V on the fitted exponential. */
 export function electronsAt({ V_0, parameters: [A, , , T] }: RetardingFit, V: number): number {
   return A * Math.exp((V - V_0) / T);
@@ -64,8 +61,17 @@ export function floatingPotentialOf(fit: RetardingFit): number | undefined {
   return undefined;
 }
 
-/** The fit to the points `from` to `to` (exclusive), from a temperature near the right one; undefined where it fails. */
-export function fitRetarding(curve: Characteristic, from: number, to: number, T: number): RetardingFit | undefined {
+/**
+ * The fit to the points `from` to `to` (exclusive), from a temperature near the right one; undefined where it fails. The
+ * tolerance is what the model itself may be off by, in parts of the current.
+ */
+export function fitRetarding(
+  curve: Characteristic,
+  from: number,
+  to: number,
+  T: number,
+  tolerance: number,
+): RetardingFit | undefined {
   const size = to - from;
   let fit: RetardingFit = {
     from,
@@ -87,8 +93,11 @@ export function fitRetarding(curve: Characteristic, from: number, to: number, T:
     const next = gaussNewton(curve, fit);
     if (!next) return undefined;
     const noise = noiseAround(curve, next);
+    // What neighbours have in common doesn't average out.
+    noise.constant *= curve.likeness ?? 1;
+    noise.relative *= curve.likeness ?? 1;
     const variances = next.fitted.map(
-      (I, i) => variance(noise, I) / curve.count[from + i] + misfit(next, curve, i) ** 2,
+      (I, i) => variance(noise, I) / curve.count[from + i] + (tolerance * sizeAt(next, curve.V[from + i])) ** 2,
     );
     fit = { ...next, noise, variances };
     if (round > 1 && Math.abs(fit.parameters[3] / before - 1) < 1e-4) break;
@@ -96,10 +105,9 @@ export function fitRetarding(curve: Characteristic, from: number, to: number, T:
   return fit;
 }
 
-/** What the model itself may be off by: a share of the electron and of the ion current at a point. */
-function misfit(fit: RetardingFit, { V }: Characteristic, i: number): number {
-  const at = V[fit.from + i];
-  return modelError * (Math.abs(electronsAt(fit, at)) + Math.abs(ionsAt(fit, at)));
+/** The currents of electrons and ions together, whatever their signs. */
+function sizeAt(fit: RetardingFit, V: number): number {
+  return Math.abs(electronsAt(fit, V)) + Math.abs(ionsAt(fit, V));
 }
 
 /** A, a and b at the temperature given. */

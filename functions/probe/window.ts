@@ -32,12 +32,12 @@ const largestChange = 0.03;
  * below the knee, mostly stands; only where it doesn't are shorter windows tried, and of those that stand the one that
  * knows the temperature best is taken. In words where none will do.
  */
-export function chooseWindow(curve: Characteristic, { T, knee }: FirstLook): RetardingFit | string {
-  const first = fitRetarding(curve, 0, topBelow(curve, knee, tops[0] * T), T);
+export function chooseWindow(curve: Characteristic, { T, knee }: FirstLook, tolerance: number): RetardingFit | string {
+  const first = fitRetarding(curve, 0, topBelow(curve, knee, tops[0] * T), T, tolerance);
   if (!first) return "no exponential on an ion line fits below the knee";
   const poor = whyPoor(curve, first);
   if (poor === undefined && lackOfFit(curve, first) > significance) return first;
-  const shorter = shorterWindows(curve, knee, first.parameters[3]);
+  const shorter = shorterWindows(curve, knee, first.parameters[3], tolerance);
   const standing = shorter.filter(
     (fit) => whyPoor(curve, fit) === undefined && lackOfFit(curve, fit) > significanceOfPicked,
   );
@@ -53,15 +53,15 @@ export function chooseWindow(curve: Characteristic, { T, knee }: FirstLook): Ret
   if (steepensAbove(curve, best, topBelow(curve, knee, 0))) {
     return `above ${format(best.V_0)} V the electron current rises faster than the ${format(best.parameters[3])} eV below allow: more than one temperature`;
   }
-  return dependsOnBottom(curve, best)
+  return dependsOnBottom(curve, best, tolerance)
     ? "the ions' side bends so much that T_e depends on where it is cut: hot electrons, or a sheath that grows with voltage"
     : best;
 }
 
 /** Whether the ions' side that the window leaves out would give another temperature: a slow tail of electrons reaches there. */
-function dependsOnBottom(curve: Characteristic, fit: RetardingFit): boolean {
+function dependsOnBottom(curve: Characteristic, fit: RetardingFit, tolerance: number): boolean {
   if (fit.from === 0) return false;
-  const whole = fitRetarding(curve, 0, fit.to, fit.parameters[3]);
+  const whole = fitRetarding(curve, 0, fit.to, fit.parameters[3], tolerance);
   return !whole || Math.abs(whole.parameters[3] / fit.parameters[3] - 1) > largestChange;
 }
 
@@ -73,7 +73,7 @@ function topBelow({ V }: Characteristic, knee: number, margin: number): number {
   return to;
 }
 
-function shorterWindows(curve: Characteristic, knee: number, T: number): RetardingFit[] {
+function shorterWindows(curve: Characteristic, knee: number, T: number, tolerance: number): RetardingFit[] {
   const { V } = curve;
   const ends = new Set(
     tops.map((top) =>
@@ -86,7 +86,7 @@ function shorterWindows(curve: Characteristic, knee: number, T: number): Retardi
   const fits: RetardingFit[] = [];
   for (const from of starts) {
     for (const to of ends) {
-      const fit = to - from >= fewestAbove + fewestBelow ? fitRetarding(curve, from, to, T) : undefined;
+      const fit = to - from >= fewestAbove + fewestBelow ? fitRetarding(curve, from, to, T, tolerance) : undefined;
       if (fit) fits.push(fit);
     }
   }

@@ -141,6 +141,30 @@ describe("sweeps that would mislead", () => {
     expect(row.remarks).toMatch(/never crosses zero/);
   });
 
+  test("a filter along the sweep is noticed by neighbours that are alike, and widens the errors", () => {
+    const filtered = fits(200).map(({ V, I, plasma, truth }) => {
+      const three = I.map((each, i) => (i === 0 || i === I.length - 1 ? each : (I[i - 1] + each + I[i + 1]) / 3));
+      return { row: fit(V, three, plasma.mass)[0], truth };
+    });
+    const fitted = filtered.filter(({ row }) => row.T_e !== "");
+    expect(fitted.length).toBeGreaterThan(150);
+    const inside = fitted.filter(({ row, truth }) => Math.abs(row.T_e - truth.T_e) < 1.96 * row.T_e_error);
+    expect(inside.length / fitted.length).toBeGreaterThan(0.9);
+    expect(fitted.filter(({ row }) => /errors widened/.test(row.remarks)).length).toBeGreaterThan(140);
+  });
+
+  test("a current that is an exponential to one per cent only is fitted with wider errors, and said so", () => {
+    const { I } = sweep(13, argonPlasma, plan, { floor: 1e-6, relative: 1e-5 });
+    const [row] = fit(
+      plan,
+      plan.map((V, i) => (V < 5 ? I[i] : I[i] * (1 + 0.01 * Math.sin(V / 3)))),
+      "Ar+",
+    );
+    expect(row.remarks).toMatch(/an exponential to 1 % only: errors widened/);
+    expect(Math.abs(row.T_e - 3)).toBeLessThan(3 * row.T_e_error);
+    expect(row.T_e_error).toBeGreaterThan(0.003);
+  });
+
   test("too few points, and steps wider than the electrons' rise, are refused by name", () => {
     expect(fit(plan.slice(0, 8), plan.slice(0, 8))[0].remarks).toMatch(/only 8 usable points/);
     const coarse = voltages(-40, 45, 5);
