@@ -4,9 +4,7 @@
  * platform's documentation stands in one small function, so that one that proves wrong is mended in one place.
  */
 import { a1, cellOf, cornersOf } from "./address";
-import type { CellContent, CellPlace, Chart, SheetContent, Workbook, WorkbookContent } from "./workbook";
-
-type Written = string | number | boolean | null;
+import type { CellContent, CellPlace, Chart, SheetContent, Workbook, WorkbookContent, Written } from "./workbook";
 
 export function officeWorkbook(): Workbook {
   return {
@@ -92,7 +90,8 @@ async function write(
 }
 
 /** The host reads text as if it were typed ("1/2" turns into a date, "-50 V" into a broken formula); an apostrophe stops it. */
-function written(value: Written): Written {
+function written(value: Written): string | number | boolean | null {
+  if (typeof value === "object" && value !== null) return value.text === "" ? "" : `'${value.text}`;
   return typeof value !== "string" || value === "" || value.startsWith("=") ? value : `'${value}`;
 }
 
@@ -103,7 +102,11 @@ async function goTo(context: Excel.RequestContext, { sheet, address }: CellPlace
   await context.sync();
 }
 
-async function replaceSheet(context: Excel.RequestContext, name: string, cells: Written[][]): Promise<void> {
+async function replaceSheet(
+  context: Excel.RequestContext,
+  name: string,
+  cells: readonly (readonly Written[])[],
+): Promise<void> {
   const found = context.workbook.worksheets.getItemOrNullObject(name);
   await context.sync();
   const sheet = found.isNullObject ? context.workbook.worksheets.add(name) : found;
@@ -268,14 +271,19 @@ function keepOnlyAnchor(content: SheetContent, range: string, anchor: string): v
 }
 
 async function readTables(context: Excel.RequestContext, sheet: Excel.Worksheet): Promise<SheetContent["tables"]> {
-  sheet.tables.load("items/name,items/columns/items/name");
+  sheet.tables.load("items/name,items/showTotals,items/columns/items/name");
   await context.sync();
   const ranges = sheet.tables.items.map((table) => table.getRange());
   ranges.forEach((range) => range.load("address"));
   await context.sync();
-  return sheet.tables.items.map(({ name, columns }, i) => ({
+  return sheet.tables.items.map(({ name, columns, showTotals }, i) => ({
     name,
-    range: plainAddress(ranges[i].address),
+    range: withoutTotals(plainAddress(ranges[i].address), showTotals),
     columns: columns.items.map((column) => column.name),
   }));
+}
+
+function withoutTotals(range: string, showTotals: boolean): string {
+  const { from, to } = cornersOf(range);
+  return showTotals ? `${a1(from)}:${a1({ ...to, row: to.row - 1 })}` : range;
 }

@@ -2,9 +2,7 @@ import { BooleanNumber, CellValueType, type ICellData } from "@univerjs/core";
 import type { FWorksheet } from "@univerjs/preset-sheets-core";
 import { selectedCell, type Grid } from "../trial/grid/grid";
 import { a1, cellOf, cellsIn, type Cell } from "./address";
-import type { CellContent, CellPlace, SheetContent, Workbook, WorkbookContent } from "./workbook";
-
-type Written = string | number | boolean | null;
+import type { CellContent, CellPlace, SheetContent, Workbook, WorkbookContent, Written } from "./workbook";
 
 /** The trial sheet's grid behind the pane's interface. */
 export function trialWorkbook(grid: Grid): Workbook {
@@ -39,8 +37,8 @@ export function trialWorkbook(grid: Grid): Workbook {
       await grid.calculated();
     },
     addChart: () => Promise.reject(new Error("the trial sheet draws no charts")),
-    getSetting: (key) => Promise.resolve(getSetting(key)),
-    setSetting: (key, value) => Promise.resolve(setSetting(key, value)),
+    getSetting: (key) => Promise.resolve(getSetting(storageKey(grid, key))),
+    setSetting: (key, value) => Promise.resolve(setSetting(storageKey(grid, key), value)),
   };
 }
 
@@ -98,6 +96,8 @@ function write(sheet: FWorksheet, from: Cell, cells: readonly (readonly Written[
 /** What stood there goes, whatever its kind: a formula, a formula shared with its neighbours, a small document. */
 function cellData(value: Exclude<Written, null>): ICellData {
   const none = { f: null, si: null, p: null };
+  if (value === "") return { ...none, v: null, t: null };
+  if (typeof value === "object") return { ...none, v: value.text, t: CellValueType.STRING };
   if (typeof value === "number") return { ...none, v: value, t: CellValueType.NUMBER };
   if (typeof value === "boolean")
     return { ...none, v: value ? BooleanNumber.TRUE : BooleanNumber.FALSE, t: CellValueType.BOOLEAN };
@@ -158,13 +158,14 @@ function pause(): Promise<void> {
 /** Settings live as long as the page, and longer where the browser lets it store anything. */
 const kept = new Map<string, string>();
 
-function storageKey(key: string): string {
-  return `wallfall.trial.${key}`;
+/** Each workbook has its own. */
+function storageKey({ workbook }: Grid, key: string): string {
+  return `wallfall.trial.${workbook.getId()}.${key}`;
 }
 
 function getSetting(key: string): string | undefined {
   try {
-    return kept.get(key) ?? localStorage.getItem(storageKey(key)) ?? undefined;
+    return kept.get(key) ?? localStorage.getItem(key) ?? undefined;
   } catch {
     return undefined;
   }
@@ -173,7 +174,7 @@ function getSetting(key: string): string | undefined {
 function setSetting(key: string, value: string): void {
   kept.set(key, value);
   try {
-    localStorage.setItem(storageKey(key), value);
+    localStorage.setItem(key, value);
   } catch {
     // Stored in the page's memory above.
   }

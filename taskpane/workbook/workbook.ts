@@ -9,6 +9,12 @@ export interface CellPlace {
 /** What a cell holds: number, text, truth, nothing (null), or an error by its code with its message where known. */
 export type CellContent = number | string | boolean | null | { error: string; message?: string };
 
+/**
+ * What is written to a cell: a formula where a string starts with "=", else the value; null leaves the cell as it is, and
+ * an empty string clears it. Text that came from anywhere else is written as { text }: it stays text whatever it holds.
+ */
+export type Written = string | number | boolean | null | { text: string };
+
 /** The used part of one sheet, from its top left cell on. Formulas start with "="; where there is none, undefined. */
 export interface SheetContent {
   name: string;
@@ -18,6 +24,7 @@ export interface SheetContent {
   formulas: (string | undefined)[][];
   /** Formulas that fill a range from one cell: the anchor's address and the filled range. */
   spills: { anchor: string; range: string }[];
+  /** Headings and data of each, without a row of totals. */
   tables: { name: string; range: string; columns: string[] }[];
 }
 
@@ -47,14 +54,14 @@ export interface Workbook {
   onSelection(listener: (place: CellPlace) => void): () => void;
   /** Whether a cell, or any cell of a range such as "B5:D9", holds what writing would destroy: a value, a formula, a part of a spill. */
   isFilled(place: CellPlace): Promise<boolean>;
-  /** Writes formulas or values (null leaves a cell as it is) from the given cell on, to the right and down. */
-  write(from: CellPlace, cells: (string | number | boolean | null)[][]): Promise<void>;
+  /** Writes formulas and values from the given cell on, to the right and down. */
+  write(from: CellPlace, cells: readonly (readonly Written[])[]): Promise<void>;
   /** Selects a cell and brings it into view. */
   goTo(place: CellPlace): Promise<void>;
   /** The whole used content, sheet by sheet; progress from 0 to 1; stops early when the signal says so. */
   read(progress?: (done: number) => void, signal?: AbortSignal): Promise<WorkbookContent>;
   /** Makes or replaces a sheet of this name with these cells; other sheets are untouched. */
-  replaceSheet(name: string, cells: (string | number | boolean | null)[][]): Promise<void>;
+  replaceSheet(name: string, cells: readonly (readonly Written[])[]): Promise<void>;
   /** Small settings kept inside the workbook, such as the reasons for accepted findings. */
   getSetting(key: string): Promise<string | undefined>;
   setSetting(key: string, value: string): Promise<void>;

@@ -129,6 +129,14 @@ test("a sheet is made where there is none, and replaced whole where there is one
   expect(host.row("Pre clean", 2)).toEqual([1e16, 3]);
 });
 
+test("text from anywhere else stays text, whatever it begins with, and an empty text clears a cell", async () => {
+  const texts = ["=1+1", "+1", "-50 V", "@SUM(A1)", "'quoted", "1/2"];
+  await workbook.write({ sheet: "Pre clean", address: "A1" }, [texts.map((text) => ({ text }))]);
+  expect(host.row("Pre clean", 1)).toEqual(texts.map((text) => `'${text}`));
+  await workbook.write({ sheet: "Pre clean", address: "A1" }, [["", { text: "" }, null]]);
+  expect(host.row("Pre clean", 1).slice(0, 3)).toEqual(["", "", "'-50 V"]);
+});
+
 test("settings are kept in the workbook under a name of their own", async () => {
   expect(await workbook.getSetting("accepted")).toBeUndefined();
   await workbook.setSetting("accepted", "B5: known");
