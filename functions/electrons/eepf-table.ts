@@ -1,5 +1,4 @@
 import { badInput, type Fault } from "../cells/fault";
-import { format } from "../cells/format";
 import type { Series } from "../cells/series";
 
 /** A measured probability function in order: rising energies, each once, in eV, with F in eV^(−3/2) m⁻³. */
@@ -94,4 +93,3 @@ function inOrder(points: Point[], notes: string[]): EepfTable {
 function rows(count: number): string {
   return `${count} row${count === 1 ? "" : "s"}`;
 }
-void format;

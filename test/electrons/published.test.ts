@@ -194,6 +194,14 @@ describe("a table as an instrument writes it", () => {
     expect(refused).toMatchObject({ code: "#N/A", message: expect.stringMatching(/does not clearly fall/) });
   });
 
+  test("negative values that outweigh the positive ones leave no density", () => {
+    const [[refused]] = EEPFMOMENTS(
+      column(grid(0, 1, 24)),
+      column(grid(0, 1, 24).map((E) => (E < 6 ? -30 : Math.exp(-E / 3)))),
+    );
+    expect(refused).toMatchObject({ code: "#N/A", message: expect.stringMatching(/negative values outweigh/) });
+  });
+
   test("an empty pair of columns gives an empty cell", () => {
     expect(EEPFMOMENTS([[null], [""]], [[null], [""]])).toEqual([[""]]);
   });
