@@ -196,8 +196,8 @@ describe("a table as an instrument writes it", () => {
 
   test("negative values that outweigh the positive ones leave no density", () => {
     const [[refused]] = EEPFMOMENTS(
-      column(grid(0, 1, 24)),
-      column(grid(0, 1, 24).map((E) => (E < 6 ? -30 : Math.exp(-E / 3)))),
+      column(grid(0, 0.5, 80)),
+      column(grid(0, 0.5, 80).map((E) => (E - 8) * Math.exp(-E / 3))),
     );
     expect(refused).toMatchObject({ code: "#N/A", message: expect.stringMatching(/negative values outweigh/) });
   });
