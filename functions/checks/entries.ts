@@ -62,7 +62,7 @@ const WITHIN = entry("WITHIN", {
   inputs: [
     amountInput("value"),
     amountInput("reference"),
-    optional(quantityInput("rel_tol", quantities.notNegative, { band: { low: 0, high: 1, above: "5 % is 0.05" } }), 0),
+    optional(quantityInput("rel_tol", quantities.notNegative, { most: 1, example: "5 %" }), 0),
     optional(amountInput("abs_tol")),
     optional(textInput("label", "type the label as text")),
   ],
@@ -89,10 +89,12 @@ const VERDICT = entry("VERDICT", {
   accuracy: "exact",
 });
 
+const functionName: Input<Cells> = { ...cellsInput("function_name"), example: '"DEBYELENGTH"' };
+
 /** The checks that look at other functions: the catalogue hands itself to them. */
 export function checksOver(directory: Directory) {
   const LIMITCHECK = entry("LIMITCHECK", {
-    inputs: [cellsInput("function_name")],
+    inputs: [functionName],
     repeats: optionalCells("inputs"),
     result: { columns: [{ name: "verdict", unit: "" }] },
     compute: (names, ...inputs: unknown[]) => limitCheck(directory, names, inputs),
@@ -105,7 +107,7 @@ export function checksOver(directory: Directory) {
   });
 
   const LIMITS = entry("LIMITS", {
-    inputs: [cellsInput("function_name")],
+    inputs: [functionName],
     repeats: optionalCells("inputs"),
     result: { columns: limitColumns },
     compute: ([[name]], ...inputs: unknown[]) => limitsTable(directory, name, inputs),
@@ -119,7 +121,7 @@ export function checksOver(directory: Directory) {
 
   const UNCERTAINTY = entry("UNCERTAINTY", {
     inputs: [
-      cellsInput("function_name"),
+      functionName,
       cellsInput("values"),
       optionalCells("rel_unc"),
       optionalCells("abs_unc"),

@@ -40,8 +40,15 @@ export function isUnstated(cell: unknown): boolean {
   return cell === null || cell === undefined || cell === 0 || (typeof cell === "string" && cell.trim() === "");
 }
 
+/** More than the value itself is 5 typed for 5 %. */
 function readRatio(cell: number | string): number | Fault {
-  return typeof cell === "number" ? cell : readQuantityText("rel_unc", quantities.ratio, cell);
+  const ratio = typeof cell === "number" ? cell : readQuantityText("rel_unc", quantities.ratio, cell);
+  if (ratio instanceof Fault || !(ratio > 1)) return ratio;
+  return badInput(
+    "rel_unc",
+    `${format(ratio)} is ${format(100 * ratio)} % of the value`,
+    'type one such as 0.05 or "5 %"',
+  );
 }
 
 /** A difference of temperatures is a difference: 5 °C are 5 K. */

@@ -185,6 +185,7 @@ describe("what cannot be done is told", () => {
     ["SUM4", [[1, 2, 3, 4]], { rel: [[0.1, 0.1]] }, /rel_unc: 1 row by 2 columns do not match values of 1 row by 4/],
     ["SUM4", [[1, 2, 3, 4]], { abs: [[1], [1]] }, /abs_unc: 2 rows by 1 column do not match/],
     ["SQUARE", [[1]], { rel: [[-0.1]] }, /rel_unc: -0.1 is no uncertainty/],
+    ["SQUARE", [[1]], { rel: [[20]] }, /^rel_unc: 20 is 2000 % of the value; type one such as 0\.05 or "5 %"\.$/],
     ["SQUARE", [[1]], { rel: [["wide"]] }, /rel_unc: "wide" is not a ratio/],
     ["CUBEROOT", [[8]], { abs: [["2 mm"]] }, /abs_unc of V: "mm" is a unit of length/],
     ["SQUARE", [[1]], { abs: [[true]] }, /abs_unc: the cell holds no number/],

@@ -41,6 +41,9 @@ describe("a comparison", () => {
     expect(within(3, 3)).toBe('rel_tol: neither rel_tol nor abs_tol is given; type a tolerance such as "5 %".');
     expect(within(3, 3, null, -1)).toMatch(/^abs_tol: -1 is negative/);
     expect(within(3, 3, -0.1)).toMatch(/^rel_tol: -0.1 is below/);
+    // 5 for 5 % would let anything up to six times the reference hold.
+    expect(within(9, 3, 5)).toBe("rel_tol: 5 is above the highest value; type a number of at most 1, such as 5 %.");
+    expect(within(9, 3, "200 %")).toMatch(/^rel_tol: "200 %" is above/);
   });
 });
 
