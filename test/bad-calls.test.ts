@@ -1,4 +1,6 @@
 import { describe, expect, test } from "vitest";
+import { catalogue } from "../functions/catalogue";
+import { Fault } from "../functions/cells/fault";
 import { isCellError } from "../functions/cells/host";
 import { frontDoors } from "../functions/front-doors";
 
@@ -18,6 +20,9 @@ const good: Record<string, unknown[]> = {
   UNIT: [5, "mTorr", "Pa"],
   CONSTANT: ["e"],
   PLASMAFREQUENCY: [1e16, "Ar+"],
+  WALLFIELD: [300, 1e16, 3, 1],
+  EROSIONRATE: [1e20, 0.5, "Si", 2330],
+  NEGATIVEIONBOHMSPEED: [3, "Ar+", 1, 15],
 };
 
 type Case = [call: string, position: number, given: unknown, says: RegExp];
@@ -26,21 +31,24 @@ const error = (code: string) => ({ code });
 
 const cases: Case[] = [
   // Blank where a value is needed
-  ["DEBYELENGTH", 0, null, /^n_e is blank; type a value such as 1e16 m\^-3/],
+  ["DEBYELENGTH", 0, null, /^n_e is blank or 0; type a value such as 1e16 m\^-3\.$/],
   ["DEBYELENGTH", 0, 0, /^n_e is blank/],
-  ["DEBYELENGTH", 1, "", /^T_e is blank; type a value such as 3 eV/],
-  ["BOHMSPEED", 1, null, /^ion is blank; type a value such as "Ar\+"/],
-  ["UNIT", 1, "", /^from is blank/],
+  ["DEBYELENGTH", 1, "", /^T_e is blank or 0; type a value such as 3 eV\.$/],
+  ["BOHMSPEED", 1, null, /^ion is blank; type a value such as "Ar\+"\.$/],
+  ["UNIT", 1, "", /^from is blank; type a value such as "cm\^-3"\.$/],
+  ["EROSIONRATE", 2, null, /^formula is blank; type a value such as "Si"\.$/],
+  ["NEGATIVEIONBOHMSPEED", 3, null, /^gamma is blank or 0; type a value such as 15\.$/],
   // Below zero, zero, beyond the range
   ["DEBYELENGTH", 0, -1e16, /^n_e: -1e16 is below the lowest value; type a density above 0/],
   ["DEBYELENGTH", 1, -3, /^T_e: -3 is below/],
   ["DEBYELENGTH", 1, "-3 eV", /^T_e: "-3 eV" is below/],
   ["BOHMSPEED", 2, -0.1, /^T_i: -0.1 is below the lowest value; type a temperature of at least 0 eV/],
   ["BOHMSPEED", 3, 5, /^gamma_i: 5 is above the highest value/],
-  ["BOHMSPEED", 3, 0.5, /^gamma_i: 0.5 is below the lowest value/],
+  ["BOHMSPEED", 3, 0.5, /^gamma_i: 0.5 is below the lowest value; type a ratio of at least 1, such as 1.5\.$/],
+  ["WALLFIELD", 3, 0.5, /^u_ratio: 0.5 is below the lowest value; type a ratio of at least 1, such as 1.5\.$/],
   ["PRESHEATHDROP", 1, 1.5, /^edge_ratio: 1.5 is above the highest value; type a ratio of at most 1/],
   ["PRESHEATHDROP", 1, "150 %", /^edge_ratio: "150 %" is above/],
-  ["WALLFLUX", 5, 120, /^angle: 120 is above the highest value; type an angle of at most 90 deg/],
+  ["WALLFLUX", 5, 120, /^angle: 120 is above the highest value; type an angle of at most 90 deg, such as 5 deg\.$/],
   ["MEANFREEPATH", 0, -5, /^p: -5 is below/],
   ["FLOATINGPOTENTIAL", 3, -0.1, /^delta_e: -0.1 is below/],
   // Text that is no quantity
@@ -62,6 +70,7 @@ const cases: Case[] = [
   // Units of something else
   ["DEBYELENGTH", 0, "5 mTorr", /"mTorr" is a unit of pressure, not a unit of density/],
   ["DEBYELENGTH", 0, "1e16 m^-2", /not a unit of density/],
+  ["DEBYELENGTH", 0, "1e10 cm3", /"cm3" is a unit of volume, not a unit of density; type a density such as 1e16 m\^-3/],
   ["DEBYELENGTH", 1, "3 V", /"V" is a unit of voltage, not a unit of temperature/],
   ["DEBYELENGTH", 1, "5 %", /"%" is a unit of ratio/],
   ["MEANFREEPATH", 0, "10 sccm", /"sccm" in "10 sccm" is not a unit known here/],
@@ -72,6 +81,9 @@ const cases: Case[] = [
   ["WALLFLUX", 5, "1 sr", /^angle: "sr" in "1 sr" is not a unit known here/],
   // Ions
   ["BOHMSPEED", 1, "Ar2+", /"Ar\^2\+" for the doubly charged ion or "\(Ar2\)\+" for the molecular ion/],
+  ["BOHMSPEED", 1, "Ar 2+", /^ion: "Ar 2\+" has its charge where it can't be read; type "Ar\^2\+"\.$/],
+  ["BOHMSPEED", 1, "Xe(2+)", /type "Xe\^2\+"\.$/],
+  ["BOHMSPEED", 1, "N2 +", /type "N2\+"\.$/],
   ["BOHMSPEED", 1, "argon", /is a name; type the symbol "Ar"/],
   ["BOHMSPEED", 1, "ar+", /nearest symbols: Ar/],
   ["BOHMSPEED", 1, "Qz+", /no element "Qz"/],
@@ -92,7 +104,7 @@ const cases: Case[] = [
   ["UNIT", 1, "furlong", /"furlong" is not a unit known here/],
   ["UNIT", 1, 5, /^from: a unit is text/],
   // No solution
-  ["EDGEDECAYLENGTH", 3, 1000, /Below the Bohm speed 2692 m\/s the potential oscillates/],
+  ["EDGEDECAYLENGTH", 3, 1000, /Below the Bohm speed 2692 m\/s the potential oscillates.*\(BOHMRATIO tells\)\.$/],
   ["FLOATINGPOTENTIAL", 3, 0.99, /space-charge limit|EMISSIONLIMIT/],
   // Too large for a cell
   ["MEANFREEPATH", 0, 1e-320, /larger than any number a cell can hold/],
@@ -124,6 +136,17 @@ describe("a bad call says what to type instead, and its neighbours keep their va
     expect(result[1][0]).toMatchObject({ code });
     expect(result[0]).toEqual(result[2]);
   });
+
+  test.each(catalogue.flatMap((entry) => entry.inputs.map((input) => [entry.name, input.name, input] as const)))(
+    "%s, %s: what a message suggests is a value there",
+    (_function, _name, input) => {
+      const { example } = input;
+      if (example === undefined) return;
+      const typed = example.replace(/^"|"$/g, "");
+      const value = input.read(input.kind === "block" ? [[typed]] : typed);
+      expect(value instanceof Fault ? value.message : "").toBe("");
+    },
+  );
 
   test("ranges that do not match are refused with both shapes", () => {
     const [[cell]] = frontDoors.DEBYELENGTH([[1e16], [1e16], [1e16]], [[3], [3]]);

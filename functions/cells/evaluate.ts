@@ -83,9 +83,11 @@ export function oddResult(inputs: readonly Input<any>[], reading: Reading, row: 
   return toCellError(blankFault(blank!));
 }
 
-function blankFault(input: Input): Fault {
-  const example = input.quantity ? ` such as ${input.quantity.example}` : input.kind === "ion" ? ' such as "Ar+"' : "";
-  return new Fault("#VALUE!", `${input.name} is blank; type a value${example}.`);
+/** An empty cell arrives as 0 on some hosts, so where a 0 counts as blank the message can't tell which it was. */
+function blankFault({ name, kind, zeroIsValue, example }: Input): Fault {
+  const found = kind === "quantity" && !zeroIsValue ? "blank or 0" : "blank";
+  const wanted = example ? `a value such as ${example}` : "a value";
+  return new Fault("#VALUE!", `${name} is ${found}; ${kind === "block" ? "give" : "type"} ${wanted}.`);
 }
 
 function evaluateRows(entry: Entry<any>, args: readonly unknown[], result: Quantity): Result {

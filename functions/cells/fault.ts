@@ -16,5 +16,5 @@ export function badInput(name: string, given: string, expected: string): Fault {
 
 /** Inputs that are fine where the model has no solution: say the bound that was passed, and what to use instead. */
 export function noSolution(message: string): Fault {
-  return new Fault("#N/A", message);
+  return new Fault("#N/A", message.endsWith(".") ? message : `${message}.`);
 }

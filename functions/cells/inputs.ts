@@ -18,6 +18,8 @@ export interface Input<T = unknown> {
   most: number;
   /** Set for inputs that are a number with a unit. */
   quantity?: Quantity;
+  /** What works there, as a message suggests it; a quantity brings its own. */
+  example?: string;
   band?: Band;
   /** Set for inputs with a closed list of words. */
   words?: readonly string[];
@@ -29,13 +31,13 @@ export interface Input<T = unknown> {
   read(cell: unknown): T | Fault;
 }
 
-/** Changes to a quantity for one input: its own range, band, or whether zero is a value there. */
-export type Range = Partial<Pick<Quantity, "least" | "most" | "zeroIsValue" | "band">>;
+/** Changes to a quantity for one input: its own range, band, example, or whether zero is a value there. */
+export type Range = Partial<Pick<Quantity, "least" | "most" | "zeroIsValue" | "band" | "example">>;
 
 /** A number, bare or with a unit. */
 export function quantityInput(name: string, quantity: Quantity, range: Range = {}): Input<number> {
   const own = { ...quantity, ...range };
-  const readText = quantityTextReader(name, quantity);
+  const readText = quantityTextReader(name, own);
   return {
     name,
     optional: false,
@@ -43,7 +45,8 @@ export function quantityInput(name: string, quantity: Quantity, range: Range = {
     zeroIsValue: own.zeroIsValue,
     least: own.least,
     most: own.most,
-    quantity,
+    quantity: own,
+    example: own.example,
     band: own.band,
     kind: "quantity",
     read: (cell) => inRange(name, own, cell, typeof cell === "string" ? readText(cell) : cell),
@@ -67,7 +70,7 @@ function inRange(name: string, quantity: Quantity, cell: unknown, value: unknown
   return badInput(
     name,
     `${given} is above the highest value`,
-    `type ${article(quantity.name)} of at most ${bound(quantity.most, quantity)}`,
+    `type ${article(quantity.name)} of at most ${bound(quantity.most, quantity)}, such as ${quantity.example}`,
   );
 }
 
@@ -95,6 +98,7 @@ export function ionInput(name = "ion"): Input<Ion> {
     least: 1,
     most: 0,
     kind: "ion",
+    example: '"Ar+"',
     band: { low: 1, high: 400, below: "kg meant? the mass is read in u", above: "the mass is read in u" },
     read(cell) {
       if (typeof cell === "number") return readIonMass(name, cell);
@@ -191,9 +195,10 @@ export function flagInput(name: string): Input<boolean> {
 }
 
 /** Any text. */
-export function textInput(name: string, wanted: string): Input<string> {
+export function textInput(name: string, wanted: string, example?: string): Input<string> {
   return {
     name,
+    example,
     optional: false,
     blank: undefined,
     zeroIsValue: false,
@@ -214,6 +219,7 @@ export function blockInput<T>(name: string, read: (cells: unknown[][]) => T | Fa
     least: 1,
     most: 0,
     quantity: of,
+    example: of?.example,
     kind: "block",
     read: (cells) => read(cells as unknown[][]),
   };

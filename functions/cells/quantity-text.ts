@@ -193,6 +193,7 @@ const kinds: [string, string][] = [
   ["T", "magnetic field"],
   ["m", "length"],
   ["m^2", "area"],
+  ["m^3", "volume"],
   ["V", "voltage"],
   ["V/m", "electric field"],
   ["A", "current"],

@@ -120,6 +120,7 @@ const spellings: Record<string, string> = {
   amp: "A",
   amps: "A",
   pct: "percent",
+  cc: "cm^3",
   meter: "m",
   metre: "m",
 };

@@ -85,5 +85,5 @@ function worse(found: Verdict | undefined, next: Verdict): Verdict {
 
 /** A model that has no solution fails, with the reason its own message gives. */
 export function unsolved(fault: Fault): string {
-  return `fails: ${fault.message}`;
+  return `fails: ${fault.message.replace(/\.$/, "")}`;
 }

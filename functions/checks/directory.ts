@@ -1,5 +1,6 @@
 import type { Entry } from "../cells/entry";
 import { badInput, Fault } from "../cells/fault";
+import { format } from "../cells/format";
 import { isCellError, passOn, type CellError } from "../cells/host";
 import { nearest } from "./nearest";
 
@@ -15,7 +16,8 @@ export function functionIn(directory: Directory, cell: unknown): Entry | CellErr
   const typed = typeof cell === "string" ? cell.trim() : "";
   const wanted = 'type the name of a function, such as "DEBYELENGTH"';
   if (typed === "") {
-    const given = typeof cell === "number" && cell !== 0 ? `${cell} is not the name of a function` : "it is blank";
+    const given =
+      typeof cell === "number" && cell !== 0 ? `${format(cell)} is not the name of a function` : "it is blank";
     return badInput("function_name", given, wanted);
   }
   const found = directory.named(typed);
@@ -25,7 +27,7 @@ export function functionIn(directory: Directory, cell: unknown): Entry | CellErr
     return badInput(
       "function_name",
       `there is no function "${typed.slice(0, 40)}"`,
-      `the nearest are ${near.join(", ")}`,
+      near.length === 1 ? `type ${near[0]}` : `type one of ${near.join(", ")}`,
     );
   }
   if (found.repeats) {

@@ -124,5 +124,5 @@ function firstDoubt(doubts: readonly Doubts[], i: number, j: number): string | u
 function doubted(verdict: string | CellError, doubt: string | undefined): string | CellError {
   if (doubt === undefined || typeof verdict !== "string") return verdict;
   const said = `doubtful input: ${doubt}`;
-  return verdict.startsWith("fails") ? `${verdict.replace(/\.$/, "")}; ${said}` : said;
+  return verdict.startsWith("fails") ? `${verdict}; ${said}` : said;
 }

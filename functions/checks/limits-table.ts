@@ -3,7 +3,7 @@ import type { Entry, Limit, Value } from "../cells/entry";
 import { oddResult, readInputs, type Result } from "../cells/evaluate";
 import { badInput, Fault } from "../cells/fault";
 import { doubtOf } from "../cells/inputs";
-import { boundsText, judge, type Verdict } from "../cells/verdict";
+import { boundsText, judge, unsolved, type Verdict } from "../cells/verdict";
 import { functionIn, isEntry, tooManyInputs, type Directory } from "./directory";
 import { problemWith } from "./limit-check";
 
@@ -29,7 +29,7 @@ export function limitsTable(directory: Directory, name: unknown, args: readonly 
   const problem = problemWith(entry, entry.compute(...values));
   if (problem && problem.code !== "#N/A") return [[problem]];
   return [
-    ...(problem ? [["the model has a solution", "", "", "", `fails: ${problem.message}`]] : []),
+    ...(problem ? [["the model has a solution", "", "", "", unsolved(problem as Fault)]] : []),
     ...doubtRows(entry, args),
     ...(entry.limits.length === 0 ? [[`${entry.name} states no limits`, "", "", "", "not tested"]] : []),
     ...entry.limits.map((limit) => limitRow(limit, judge(limit, values))),

@@ -14,7 +14,7 @@ import { coldBohmSpeed, edgeDebyeLength } from "./twins";
 
 const first = { "1.0.0": "first version" };
 const closedForm = "closed form, 4 ulp";
-const gamma_i = optional(quantityInput("gamma_i", quantities.ratio, { least: 1, most: 3 }), 1);
+const gamma_i = optional(quantityInput("gamma_i", quantities.ratio, { least: 1, most: 3, example: "1.5" }), 1);
 
 export const WALLTOEDGE = entry("WALLTOEDGE", {
   inputs: [

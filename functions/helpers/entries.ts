@@ -96,6 +96,7 @@ function unitInput(name: string): Input<Unit> {
     least: 1,
     most: 0,
     kind: "text",
+    example: '"cm^-3"',
     read: (cell) => {
       const wanted = 'type a unit such as "cm^-3", "mTorr" or "K"';
       if (typeof cell !== "string") return badInput(name, "a unit is text", wanted);

@@ -20,7 +20,7 @@ function readEach<T>(one: Input<T>) {
 }
 
 /** Formulas or masses in u, one a cell. */
-export const ions = blockInput("ions", readEach(ionInput("ions")));
+export const ions = { ...blockInput("ions", readEach(ionInput("ions"))), example: '"Ar+"' };
 
 /** Densities over the electron density, one beside each ion. */
 export const fractions = blockInput(

@@ -8,6 +8,7 @@ export const u_ratio = optional(
   quantityInput("u_ratio", quantities.ratio, {
     least: 1,
     most: 1e6,
+    example: "1.5",
     band: { low: 1, high: 10, above: "speed over u_B, not m/s" },
   }),
   1,

@@ -33,6 +33,11 @@ export function parseIon(text: string): Ion | FormulaError {
     .replace(/[₀-₉]/g, (digit) => String(digit.charCodeAt(0) - 0x2080));
   const parts = /^(.*?)(?:\^(\d+)\+|\^\+(\d*)|(\++)|\+(\d+))?$/.exec(typed)!;
   const [, formula, caretDigits, caretPlus, pluses, plusDigits] = parts;
+  const apart = /^([A-Z][A-Za-z\d]*)\s*(?:\s|\()(\d*)\+\)?$/.exec(typed);
+  if (apart) {
+    const spelled = apart[2] ? `${apart[1]}^${apart[2]}+` : `${apart[1]}+`;
+    return new FormulaError("has its charge where it can't be read", `type "${spelled}"`);
+  }
   if (/-|\^/.test(formula)) {
     return new FormulaError("is not a positive ion", 'type a formula such as "Ar+", "N2+" or "Xe^2+"');
   }

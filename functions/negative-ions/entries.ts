@@ -25,6 +25,7 @@ const alpha_s = electronegativity("alpha_s");
 const gamma = quantityInput("gamma", quantities.ratio, {
   least: 1e-3,
   most: 1e6,
+  example: "15",
   band: { low: 1, high: 1000, below: "T_e/T₋ meant, not its inverse?" },
 });
 
@@ -115,6 +116,6 @@ function floating(T_e: number, ion: Ion, alpha_s: number, gamma: number): number
     ? -T_e * Math.log(excess)
     : noSolution(
         `The positive ions bring ${format(1 / excess)} times the charge that all electrons could balance, so no wall floats ` +
-          "below the sheath edge; it takes a smaller alpha_s.",
+          "below the sheath edge; give a smaller alpha_s.",
       );
 }

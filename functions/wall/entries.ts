@@ -399,6 +399,7 @@ export const EMISSIONYIELD = entry("EMISSIONYIELD", {
     quantityInput("E_max", quantities.energy, {
       least: Number.MIN_VALUE,
       zeroIsValue: false,
+      example: "300 eV",
       band: { low: 20, high: 5000, below: "keV meant?" },
     }),
   ],

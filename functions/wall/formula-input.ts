@@ -8,7 +8,7 @@ const wanted = 'type a formula such as "Si" or "Al2O3", or a mass in u';
 /** What a surface is made of, as the mass in kg of one formula unit; a number is that mass in u, for a mixture. */
 export function formulaInput(name: string): Input<number> {
   return {
-    ...textInput(name, wanted),
+    ...textInput(name, wanted, '"Si"'),
     read: (cell) => {
       if (typeof cell === "number")
         return cell > 0.5 && cell < 5000 ? cell * u : badInput(name, `${cell} u is no mass of a formula unit`, wanted);

@@ -91,7 +91,7 @@ describe("ranges broadcast", () => {
 
 describe("blanks", () => {
   test.each([[0], [null], [""], ["  "], [undefined]])("%j is a blank density", (blank) => {
-    expect(messages(on([[1], [blank]], [[5], [6]]))[1]).toMatch(/^n is blank; type a value such as 1e16 m\^-3/);
+    expect(messages(on([[1], [blank]], [[5], [6]]))[1]).toMatch(/^n is blank or 0; type a value such as 1e16 m\^-3/);
   });
   test("zero is a voltage", () => expect(on([[2]], [[0]])).toEqual([[0]]));
   test("a row whose inputs are all blank returns an empty text, not null and not 0", () => {

@@ -21,6 +21,8 @@ describe("spellings of one unit mean the same", () => {
         "1e11 1/cm3",
         "1E+11 cm**-3",
         "1e11 per cm3",
+        "1e11/cc",
+        "1e11 per cc",
         "10^11 cm-3",
         "10¹¹ cm⁻³",
         "1×10^11 cm^-3",

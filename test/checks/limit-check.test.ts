@@ -162,9 +162,10 @@ describe("the function's name", () => {
   });
 
   test.each([
-    ["DEBYELENGHT", /no function "DEBYELENGHT"; the nearest are DEBYELENGTH\b/],
-    ["SHEATH.BOHM", /nearest are .*BOHMSPEED/],
-    ["DEBYELENGTH(A1,B1)", /nearest are DEBYELENGTH\b/],
+    ["DEBYELENGHT", /no function "DEBYELENGHT"; type DEBYELENGTH\.$/],
+    ["SHEATH.BOHM", /type one of .*BOHMSPEED/],
+    ["DEBYELENGTH(A1,B1)", /type DEBYELENGTH\.$/],
+    [1e16, /1e16 is not the name of a function/],
     [12, /12 is not the name of a function; type the name/],
     ["LIMITCHECK", /LIMITCHECK is itself a check/],
   ])("%o is told what to type instead", (name, says) => {
