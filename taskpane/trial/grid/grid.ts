@@ -7,6 +7,7 @@ import {
   ILayoutService,
   ISuperTableService,
   SetFormulaCalculationStartMutation,
+  SheetInterceptorService,
   SheetsSelectionsService,
   UniverSheetsCorePreset,
   type FWorkbook,
@@ -19,6 +20,7 @@ import { keepPartsNamed } from "./accessible-names";
 import { Contents } from "./contents";
 import { showOwnMessages } from "./error-popup";
 import { Messages } from "./messages";
+import { shortenNumbers } from "./long-numbers";
 import { parameterHelp } from "./parameter-help";
 import { repairFormulaEngine } from "./repairs";
 import { gridFunction, namespace } from "./sheath-function";
@@ -80,6 +82,7 @@ export function createGrid(
     return { workbook, contents: new Contents(workbook, injector.get(FormulaDataModel), messages) };
   };
   let shown = show(data, tablesOfData);
+  shortenNumbers(injector.get(SheetInterceptorService));
   showOwnMessages(injector.get(CellAlertManagerService), () => shown);
   api.onBeforeCommandExecute(({ id }) => {
     if (id === SetFormulaCalculationStartMutation.id) messages.startRun();
