@@ -1,6 +1,7 @@
 import { scaleLinear, scaleLog } from "d3-scale";
+import { prettyUnit } from "../../functions/cells/format";
 import type { Trace } from "./curve-data";
-import { scaledUnit } from "./curve-unit";
+import { powerOfTen, scaledUnit } from "./curve-unit";
 import { numberText } from "./number-text";
 
 /** An axis of a plot: where a value stands, and what is written along it. */
@@ -55,24 +56,34 @@ export function axisFor(values: readonly number[], wanted: Wanted): Axis {
 }
 
 function logarithmic(ends: [number, number], count: number, { pixels, unit, vertical }: Wanted): Axis {
-  const { factor, text } = scaledUnit(unit, 1);
+  const label = Math.abs(Math.log10(ends[1] / ends[0])) > 6 ? powerText : (value: number) => numberText(value);
   const scale = scaleLog(ends, pixels);
   if (vertical) scale.nice();
   const values = scale.ticks(count);
   const labelled = (mantissas: readonly number[]): Tick[] =>
     values.map((value) => ({
       at: scale(value),
-      label: mantissas.includes(mantissaOf(value)) ? numberText(value / factor) : "",
+      label: mantissas.includes(mantissaOf(value)) ? label(value) : "",
     }));
   const choices = mantissaChoices.map(labelled);
-  return { at: scale, ticks: choices.find((ticks) => keepApart(ticks, vertical)) ?? choices.at(-1)!, unit: text };
+  return {
+    at: scale,
+    ticks: choices.find((ticks) => keepApart(ticks, vertical)) ?? choices.at(-1)!,
+    unit: prettyUnit(unit),
+  };
 }
 
 /** Which ticks of each decade get a label, where there is room for them. */
 const mantissaChoices = [[1, 2, 3, 5], [1, 3], [1]];
 
 function mantissaOf(value: number): number {
-  return Math.round(value / 10 ** Math.floor(Math.log10(value) + 1e-9));
+  const size = Math.abs(value);
+  return Math.round(size / 10 ** Math.floor(Math.log10(size) + 1e-9));
+}
+
+/** Over many decades each label is a power of ten. */
+function powerText(value: number): string {
+  return (value < 0 ? "−" : "") + powerOfTen(Math.round(Math.log10(Math.abs(value))));
 }
 
 function keepApart(ticks: readonly Tick[], vertical: boolean): boolean {

@@ -66,6 +66,7 @@ function drawPanel(curve: Curve, traces: readonly Trace[], x: Axis, y: Axis, fra
     ),
     svg("path", { class: "axis", d: `M${left} ${top}V${bottom}H${right}` }),
     ...(curve.alone ? lonePeak(curve.alone, x, frame) : []),
+    ...(curve.stretches ?? []).flatMap((stretch) => word(curve, stretch, traces[0], x, y, frame)),
     ...traces.map((trace, i) => svg("path", { class: `trace trace-${i}`, d: through(curve.x, trace, x, y) })),
     ...title(traces, y.unit, curve.fromWall ? left + 8 : left, top - 10),
   ];
@@ -133,22 +134,35 @@ const marked: Partial<Record<Stretch["word"], string>> = {
   "doubtful input": "sparse",
 };
 
-/** A stretch where a limit doesn't hold: hatched like a wall where it fails, thinly so where it is marginal, and its word. */
-function band({ x: { values }, stretches = [] }: Curve, stretch: Stretch, x: Axis, frame: Frame): SVGElement[] {
-  const between = (i: number, j: number) => (x.at(values[i]) + x.at(values[j])) / 2;
-  const from = stretch.first === 0 ? frame.left : between(stretch.first - 1, stretch.first);
-  const to = stretch.last === values.length - 1 ? frame.right : between(stretch.last, stretch.last + 1);
+/** A stretch where a limit doesn't hold: hatched like a wall where it fails, thinly so where it is marginal. */
+function band(curve: Curve, stretch: Stretch, x: Axis, { top, bottom }: Frame): SVGElement[] {
+  const [from, to] = endsOf(curve, stretch, x);
+  const size = { x: from, y: top, width: to - from, height: bottom - top };
+  const isLast = stretch.last === curve.x.values.length - 1;
+  const border = x.at(curve.x.values[0]) < x.at(curve.x.values.at(-1)!) ? to : from;
   const pattern = marked[stretch.word];
-  const size = { x: from, y: frame.top, width: to - from, height: frame.bottom - frame.top };
-  const next = stretches[stretches.indexOf(stretch) + 1];
-  const fits = stretch.word.length * characterWidth + 8 < to - from;
   return [
     ...(pattern ? [svg("rect", { ...size, class: "band", fill: `url(#wallfall-${pattern})` })] : []),
-    ...(next ? [svg("path", { class: "border", d: `M${to} ${frame.top}V${frame.bottom}` })] : []),
-    ...(fits
-      ? [svg("text", { class: "said", x: (from + to) / 2, y: frame.top + 13, "text-anchor": "middle" }, stretch.word)]
-      : []),
+    ...(isLast ? [] : [svg("path", { class: "border", d: `M${border} ${top}V${bottom}` })]),
   ];
+}
+
+/** The word of a stretch where there is room for it, away from the curve. */
+function word(curve: Curve, stretch: Stretch, trace: Trace, x: Axis, y: Axis, { top, bottom }: Frame): SVGElement[] {
+  const [from, to] = endsOf(curve, stretch, x);
+  const isAll = curve.stretches?.length === 1;
+  if ((isAll && stretch.word === "not tested") || stretch.word.length * characterWidth + 8 > to - from) return [];
+  const height = y.at(trace.values[Math.round((stretch.first + stretch.last) / 2)]);
+  const at = height < (top + bottom) / 2 ? bottom - 8 : top + 14;
+  return [svg("text", { class: "word", x: (from + to) / 2, y: at, "text-anchor": "middle" }, stretch.word)];
+}
+
+/** Pixels from left to right; neighbours meet halfway between their last and first values. */
+function endsOf({ x: { values } }: Curve, { first, last }: Stretch, x: Axis): [number, number] {
+  const between = (i: number, j: number) =>
+    (x.at(values[Math.max(0, i)]) + x.at(values[Math.min(j, values.length - 1)])) / 2;
+  const ends = [first === 0 ? x.at(values[0]) : between(first - 1, first), between(last, last + 1)];
+  return [Math.min(...ends), Math.max(...ends)];
 }
 
 function hatchings(): SVGElement {

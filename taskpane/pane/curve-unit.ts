@@ -21,8 +21,7 @@ export function scaledUnit(unit: string, size: number): ScaledUnit {
   const factor = Number(`1e${power}`);
   const prefix = mayHavePrefix ? prefixes[power] : undefined;
   if (prefix) return { factor, text: prefix + plain.text, named: true };
-  const ten = `10${superscript(power)}`;
-  return { factor, text: `${ten} ${plain.text}`.trimEnd(), named: false };
+  return { factor, text: `${powerOfTen(power)} ${plain.text}`.trimEnd(), named: false };
 }
 
 /** A value with its unit as it stands in a sentence. */
@@ -33,13 +32,15 @@ export function quantity(value: number, unit: string): string {
     : `${numberText(value, 4)} ${prettyUnit(unit)}`.trimEnd();
 }
 
-/** "−300 to −0.339 V": both ends in the unit that suits the larger. */
+/** "−300 to −0.339 V": both ends in the unit that suits the larger, where it suits the smaller, too. */
 export function span(first: number, last: number, unit: string): string {
   const { factor, text, named } = scaledUnit(unit, Math.max(Math.abs(first), Math.abs(last)));
-  const by = named ? factor : 1;
-  return `${numberText(first / by, 4)} to ${numberText(last / by, 4)} ${named ? text : prettyUnit(unit)}`.trimEnd();
+  const isFar = first !== 0 && last !== 0 && Math.abs(Math.log10(Math.abs(last / first))) > 4;
+  const [by, name] = named && !isFar ? [factor, text] : [1, prettyUnit(unit)];
+  return `${numberText(first / by, 4)} to ${numberText(last / by, 4)} ${name}`.trimEnd();
 }
 
-function superscript(power: number): string {
-  return [...String(power)].map((digit) => (digit === "-" ? "⁻" : "⁰¹²³⁴⁵⁶⁷⁸⁹"[Number(digit)])).join("");
+export function powerOfTen(power: number): string {
+  const digits = [...String(power)].map((digit) => (digit === "-" ? "⁻" : "⁰¹²³⁴⁵⁶⁷⁸⁹"[Number(digit)])).join("");
+  return `10${digits}`;
 }

@@ -9,13 +9,15 @@ import type { Spacing } from "../sweep/values";
 export async function writeSweep(workbook: Workbook, sweep: Sweep, spacing: Spacing): Promise<string> {
   const from = await workbook.selection();
   if (!from) return "No cell is selected: select one in the sheet first.";
-  const table = sweepTable(sweep, cellOf(from.address));
+  const corner = cellOf(from.address);
+  const table = sweepTable(sweep, corner);
   const { rows, columns } = table.size;
   const filled = await firstFilled(workbook, from, rows, columns);
   if (filled)
     return `${spell(filled)} is filled, and nothing was written. Select a cell with ${rows} rows and ${columns} columns free.`;
   await workbook.write(from, table.cells);
-  const written = `Written from ${spell(from)} on, ${rows} rows by ${columns} columns.`;
+  const last = a1({ row: corner.row + rows - 1, column: corner.column + columns - 1 });
+  const written = `Written to ${from.address}:${last} on “${from.sheet}”.`;
   return workbook.capabilities.has("chart")
     ? `${written} ${await chart(workbook, from, table, sweep, spacing)}`
     : written;

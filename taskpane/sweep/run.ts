@@ -17,7 +17,7 @@ export function runSweep(sweep: Sweep, spacing: Spacing): Curve | string {
   return {
     x: { name, unit: kind === "ion" ? "u" : (quantity?.unit ?? ""), values },
     y: tracesOf(sweep, result),
-    logarithmicX: spacing === "logarithmic" && values[0] > 0,
+    logarithmicX: spacing === "logarithmic",
     fromWall: false,
     stretches: stretchesOf(entry, args, swept, result),
   };

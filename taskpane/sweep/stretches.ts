@@ -1,9 +1,9 @@
 import type { Entry, Limit } from "../../functions/cells/entry";
 import { readInputs, type Result } from "../../functions/cells/evaluate";
 import { Fault } from "../../functions/cells/fault";
-import { format } from "../../functions/cells/format";
 import { doubtOf } from "../../functions/cells/inputs";
 import { worstOf, type Word } from "../../functions/cells/verdict";
+import { numberText } from "../pane/number-text";
 
 /** Neighbouring rows of a sweep of which the same is to be said. Rows are counted from 0; both ends belong to it. */
 export interface Stretch {
@@ -52,7 +52,7 @@ function verdictAt(entry: Entry<any>, values: readonly unknown[], doubt: string 
 
 function between({ measure, holds, fails }: Limit): string {
   const [low, high] = [Math.min(holds, fails), Math.max(holds, fails)];
-  return `${measure} between ${format(low)} and ${format(high)}`;
+  return `${measure} between ${numberText(low, 3)} and ${numberText(high, 3)}`;
 }
 
 /** "n_e 1e11 m⁻³; cm⁻³ meant?" without the value, which differs from row to row. */
