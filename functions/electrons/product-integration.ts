@@ -55,8 +55,9 @@ export function addWeights(piece: Piece, weights: Float64Array, left: number, ri
 
 /** Calls back at the Gauss points in s = √E with E, the weight of E^(−1/2) dE, and the fraction of the piece. */
 function eachPoint({ a, b, F_a, F_b, exponential }: Piece, use: (E: number, weight: number, t: number) => void): void {
-  // A steep piece is cut so that each part falls by less than a factor 4.
-  const parts = exponential ? Math.max(1, Math.ceil(Math.abs(Math.log(F_b / F_a)) / 1.4)) : 1;
+  // A steep piece is cut so that each part falls by less than a factor 4. The logarithms are taken apart because the ratio
+  // of a denormal number and an ordinary one overflows, and infinitely many parts would never end.
+  const parts = exponential ? Math.max(1, Math.ceil(Math.abs(Math.log(F_b) - Math.log(F_a)) / 1.4)) : 1;
   const part = (b - a) / parts;
   for (let k = 0; k < parts; k++) {
     const from = Math.sqrt(a + k * part);
