@@ -39,7 +39,7 @@ export const CONSTANT = entry("CONSTANT", {
 });
 
 export const UNIT = entry("UNIT", {
-  inputs: [quantityInput("value", quantities.number), unitInput("from"), optional(unitInput("to"))],
+  inputs: [bareNumber("value"), unitInput("from"), optional(unitInput("to"))],
   result: quantities.number,
   compute: (value, from, to) => {
     const target = to ?? ownUnit(from);
@@ -85,6 +85,18 @@ export const ABOUT = entry("ABOUT", {
 });
 
 export const helpers: Family = { title: "Helpers", entries: [IONMASS, CONSTANT, UNIT, ABOUT] };
+
+/** A number whose unit stands elsewhere: "5 %" beside "%" would be converted twice. */
+function bareNumber(name: string): Input<number> {
+  const number = quantityInput(name, quantities.number);
+  return {
+    ...number,
+    read: (cell) =>
+      typeof cell === "string" && cell.includes("%")
+        ? badInput(name, `"${cell.trim()}" carries a unit of its own`, "type the number alone, and its unit in from")
+        : number.read(cell),
+  };
+}
 
 /** Text that names a unit, the amplitudes of an oscilloscope included. */
 function unitInput(name: string): Input<Unit> {

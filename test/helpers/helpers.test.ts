@@ -34,6 +34,11 @@ describe("UNIT", () => {
     }
   });
 
+  test("a number that carries its own percent sign is not converted twice", () => {
+    expect(one("UNIT", "5 %", "%").message).toMatch(/type the number alone/);
+    expect(one("UNIT", 5, "%")).toBe(0.05);
+  });
+
   test("cycles and radians are not interchanged silently", () => {
     expect(one("UNIT", 1, "Hz", "rad/s").message).toMatch(/write the factor 2π into the formula/);
   });
