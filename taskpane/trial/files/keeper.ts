@@ -14,7 +14,7 @@ export type Keeping =
   | { is: "refused"; why: string };
 
 /** A pause in typing; a book that takes long to copy is copied less often. */
-const shortPause = 300;
+const shortPause = 50;
 
 /**
  * Keeps the work of this tab in the browser's store, change by change. Every book opened is a work of its own, so what
@@ -49,6 +49,12 @@ export class Keeper {
 
   /** The work this tab had before a reload, or one that no tab has any more; undefined where there is none. */
   async resume(): Promise<{ work: Work; how: "reload" | "left" | "copy" } | undefined> {
+    const found = await this.find();
+    if (!found) await this.begin("Opening example", false);
+    return found;
+  }
+
+  private async find(): Promise<{ work: Work; how: "reload" | "left" | "copy" } | undefined> {
     if (!this.store) return undefined;
     try {
       const own = rememberedWork();
@@ -99,7 +105,7 @@ export class Keeper {
   async begin(title: string, isOutside: boolean): Promise<void> {
     const id = newBookId();
     this.adopt({ id, title, version: undefined, changed: 0 }, await claim(id));
-    this.tell({ is: "untouched" });
+    if (this.keeping.is !== "refused") this.tell({ is: "untouched" });
     if (isOutside) this.note();
   }
 

@@ -98,7 +98,7 @@ function putTotals(sheet: SampleSheet): void {
   sheet.type(`A${total + 1}`, "Its standard uncertainty where the tiles' are independent, kW", "label");
   sheet.native(
     `H${total + 1}`,
-    `=SQRT(SUMPRODUCT(${columns.u}*${columns.area},${columns.u}*${columns.area}))/1000`,
+    `=SQRT(SUMPRODUCT(${columns.u},${columns.area},${columns.u},${columns.area}))/1000`,
     u,
     "calculated",
     "0.0",
