@@ -47,7 +47,7 @@ export const PROBEDENSITY = entry("PROBEDENSITY", {
   ],
   sources: [LL, C03],
   changes: first,
-  example: ["25 uA", "1e-6 m^2", 3, "Ar+"],
+  example: [25e-6, 1e-6, 3, "Ar+"],
   accuracy: closedForm,
 });
 
@@ -91,7 +91,7 @@ export const ORBITALCURRENT = entry("ORBITALCURRENT", {
   ],
   sources: [C03, MSL26],
   changes: first,
-  example: [50, 1e15, "0.05 mm", "5 mm", "Ar+"],
+  example: [50, 1e15, 5e-5, 5e-3, "Ar+"],
   accuracy: closedForm,
 });
 
@@ -106,7 +106,7 @@ export const ORBITALDENSITY = entry("ORBITALDENSITY", {
   ],
   sources: [C03, MSL26],
   changes: first,
-  example: ["1.2 uA", 50, "0.05 mm", "5 mm", "Ar+"],
+  example: [1.2e-6, 50, 5e-5, 5e-3, "Ar+"],
   accuracy: closedForm,
 });
 
