@@ -38,7 +38,9 @@ export function judgeAll(entry: Entry<any>, values: readonly unknown[]): Verdict
 export function verdictText({ limit, word, value, needs }: Verdict): string {
   if (word === "not tested") return `not tested: give ${needs}`;
   if (word === "holds") return "holds";
-  const measured = `${limit.measure} ${telling(limit, value!, word)} (${format(limit.holds)}…${format(limit.fails)})`;
+  const [holds, fails] = [format(limit.holds), format(limit.fails)];
+  const bounds = limit.holds === limit.fails ? `${holds} or more` : `${holds}…${fails}`;
+  const measured = `${limit.measure} ${telling(limit, value!, word)} (${bounds})`;
   return word === "marginal" ? `marginal: ${measured}` : `fails: ${limit.reason}: ${measured}`;
 }
 

@@ -111,7 +111,7 @@ export function pathAboveDebye(of: Of<[lambda_i: number | undefined, n_edge: num
     value: pathOverDebye(of),
     holds: 1,
     fails: 1,
-    reason: "ions collide within a Debye length, so they enter more slowly: COLLISIONALBOHMSPEED",
+    reason: "ions collide within a Debye length, so they enter more slowly (COLLISIONALBOHMSPEED)",
     source: LL,
   };
 }

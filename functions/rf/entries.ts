@@ -7,6 +7,8 @@ import { coldBohmSpeed, edgeDebyeLength } from "../edge/twins";
 import { missingPath } from "../layer/inputs";
 import { fallsFreely } from "../layer/limits";
 import { ionMotions, ionTransitTime } from "../layer/model";
+import { maxwellianTail } from "../wall/limits";
+import { floatingOrWhyNot } from "../wall/potentials";
 import { BB68, GE62, L88, L89, LL } from "../sources";
 import {
   highVoltage,
@@ -108,7 +110,11 @@ export const SHEATHRESISTANCE = entry("SHEATHRESISTANCE", {
   compute: (n_bulk, T_e, ion, edge_ratio) => model.sheathResistance(edge_ratio * n_bulk, T_e, ion),
   equation: String.raw`R = \left|\frac{\mathrm{d}J}{\mathrm{d}V_w}\right|^{-1}_{V_f} = \frac{T_e}{e\, n_\mathrm{edge}\, u_B}`,
   twin: { steps: [coldBohmSpeed], formula: "T_e/(e*edge_ratio*n_bulk*u_B)" },
-  limits: [manyInDebyeSphere((n_bulk, T_e, _ion, edge_ratio) => [edge_ratio * n_bulk, T_e])],
+  limits: [
+    // The slope is that of the electrons which cross: their own temperature counts.
+    maxwellianTail((_n_bulk, T_e, ion) => ({ V_w: floatingOrWhyNot(T_e, ion), T_e, ion, T_i: undefined })),
+    manyInDebyeSphere((n_bulk, T_e, _ion, edge_ratio) => [edge_ratio * n_bulk, T_e]),
+  ],
   sources: [LL],
   changes: first,
   example: [1e17, 3, "Ar+"],

@@ -45,7 +45,7 @@ export function FLOATINGPOTENTIAL(
  * @param ion Ion as a formula or a mass in u.
  * @param [T_i] Ion temperature, eV; 0 unless given.
  * @param [edge_ratio] Density at the sheath edge over that of the body, 0 to 1; exp(-1/2) unless given.
- * @param [angle] Angle between a strong magnetic field and the wall, degrees; 90 unless given.
+ * @param [angle] Angle between a strong magnetic field and the wall, degrees; 90 unless given, and a 0 counts as not given.
  * @param [unit] Unit of the result, m⁻² s⁻¹ unless given.
  */
 export function WALLFLUX(
@@ -69,7 +69,7 @@ export function WALLFLUX(
  * @param ion Ion as a formula or a mass in u.
  * @param [T_i] Ion temperature, eV; 0 unless given.
  * @param [edge_ratio] Density at the sheath edge over that of the body, 0 to 1; exp(-1/2) unless given.
- * @param [angle] Angle between a strong magnetic field and the wall, degrees; 90 unless given.
+ * @param [angle] Angle between a strong magnetic field and the wall, degrees; 90 unless given, and a 0 counts as not given.
  * @param [unit] Unit of the result, A/m² unless given.
  */
 export function IONCURRENTDENSITY(
@@ -182,7 +182,7 @@ export function IONIMPACTENERGY(T_e: any[][], ion: any[][], T_i?: any[][], V_w?:
  * @param [edge_ratio] Density at the sheath edge over that of the body, 0 to 1; exp(-1/2) unless given.
  * @param [delta_e] Electrons emitted per electron that strikes the wall; 0 unless given.
  * @param [surface_energy] Energy that each ion sets free on the surface (neutralisation, recombination), eV; 0 unless given.
- * @param [angle] Angle between a strong magnetic field and the wall, degrees; 90 unless given.
+ * @param [angle] Angle between a strong magnetic field and the wall, degrees; 90 unless given, and a 0 counts as not given.
  * @param [unit] Unit of the result, W/m² unless given.
  */
 export function WALLHEATFLUX(

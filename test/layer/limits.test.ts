@@ -49,6 +49,10 @@ describe("what SHEATHWIDTH assumes", () => {
   test("a path below the Debye length fails the collisional law", () => {
     const path = (lambda_i: number) => at("λ_i/λ_D", /Bohm/, 300, 1e16, 3, "collisional", lambda_i);
     expect([1.3e-4, 1.2e-4].map(path)).toEqual(["holds", "fails"]);
+    const cells = [300, 1e16, 3, "collisional", 1.2e-4].map((cell) => [[cell]]);
+    expect(LIMITCHECK([["SHEATHWIDTH"]], ...cells)[0][0]).toBe(
+      "fails: ions collide within a Debye length, so they enter more slowly (COLLISIONALBOHMSPEED): λ_i/λ_D 0.932 (1 or more)",
+    );
   });
 
   // Their charge by the first integral of Poisson's equation with uniform ions, ½E² = η − 1 + e^(−η).

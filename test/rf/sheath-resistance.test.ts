@@ -1,4 +1,5 @@
 import { describe, expect, test } from "vitest";
+import { LIMITCHECK } from "../../functions/checks/functions";
 import { freeEdgeRatio } from "../../functions/edge/model";
 import { e, m_e, u } from "../../functions/matter/constants";
 import type { Ion } from "../../functions/matter/ion";
@@ -32,6 +33,12 @@ describe("SHEATHRESISTANCE", () => {
   test("without an edge ratio the edge has exp(−½) of the body's density", () => {
     const ask = (ratio: unknown) => SHEATHRESISTANCE([[1e17]], [[3]], [["Ar+"]], [[ratio]])[0][0];
     expect(ask(null)).toBe(ask(freeEdgeRatio));
+  });
+
+  test("the slope is that of the tail, which argon of 3 eV may have lost and argon of 2 eV has not", () => {
+    const check = (T_e: number) => LIMITCHECK([["SHEATHRESISTANCE"]], [[1e17]], [[T_e]], [["Ar+"]])[0][0];
+    expect(check(2)).toBe("holds");
+    expect(check(3)).toMatch(/^marginal: \|V_w\|\/first excitation energy 1\.22/);
   });
 
   test("resistance times area comes in Ω cm² on request", () => {
