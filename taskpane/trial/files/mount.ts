@@ -4,7 +4,7 @@ import { readBook } from "../../workbook/xlsx-read";
 import { writeBook } from "../../workbook/xlsx-write";
 import type { Grid } from "../grid/grid";
 import { toGridBook, type GridBook } from "./book-data";
-import { download } from "./download";
+import { download } from "../../pane/download";
 import { acceptDrops } from "./drop";
 import { toFileBook } from "./file-book";
 import type { Keeper } from "./keeper";
