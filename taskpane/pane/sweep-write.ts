@@ -1,6 +1,6 @@
 import { a1, cellOf } from "../workbook/address";
 import { firstFilled } from "../workbook/filled";
-import type { CellPlace, Workbook } from "../workbook/workbook";
+import type { CellPlace, Workbook, Written } from "../workbook/workbook";
 import { sweepTable, type Sweep, type SweepTable } from "../sweep/table";
 import { spell } from "./write-view";
 import type { Spacing } from "../sweep/values";
@@ -55,11 +55,13 @@ async function chart(
 export async function copySweep(sweep: Sweep): Promise<string> {
   const { cells } = sweepTable(sweep, { row: 0, column: 0 });
   try {
-    await navigator.clipboard.writeText(
-      cells.map((row) => row.map((cell) => String(cell ?? "")).join("\t")).join("\n"),
-    );
+    await navigator.clipboard.writeText(cells.map((row) => row.map(pasted).join("\t")).join("\n"));
   } catch {
     return "This page may not use the clipboard.";
   }
   return "Copied: paste it into cell A1 of an empty sheet that has these functions.";
+}
+
+function pasted(cell: Written): string {
+  return String(typeof cell === "object" ? (cell?.text ?? "") : cell);
 }

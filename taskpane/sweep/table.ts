@@ -4,6 +4,7 @@ import type { Input } from "../../functions/cells/inputs";
 import { a1, type Cell } from "../workbook/address";
 import { labels } from "../pane/labels";
 import type { Typed } from "../pane/typed";
+import type { Written } from "../workbook/workbook";
 
 /** A sweep as it was asked for: one input runs through values, the others stand as typed. */
 export interface Sweep {
@@ -18,7 +19,7 @@ export interface Sweep {
 }
 
 export interface SweepTable {
-  cells: (string | number | boolean | null)[][];
+  cells: Written[][];
   size: { rows: number; columns: number };
   /** What a chart draws: the headed columns of the swept input and of the result. */
   plotted: { from: Cell; to: Cell };
@@ -47,7 +48,7 @@ export function sweepTable(sweep: Sweep, corner: Cell): SweepTable {
   // The result's further columns belong to its formula.
   const filled = new Array<null>(results.length - 1).fill(null);
   const cells = [
-    ...still.map((i) => [heading(entry.inputs[i], typed[i].cell), typed[i].cell]),
+    ...still.map((i) => [heading(entry.inputs[i], typed[i].cell), asTyped(typed[i].cell)]),
     ...(head > 0 ? [[]] : []),
     [...headings, ...(checked ? [labels.limits] : [])],
     [values[0], formula, ...filled, ...(checked ? [check] : [])],
@@ -62,6 +63,11 @@ export function sweepTable(sweep: Sweep, corner: Cell): SweepTable {
     },
     headings,
   };
+}
+
+/** Text in the form is text in the cell, whatever it begins with. */
+function asTyped(cell: Typed["cell"]): Written {
+  return typeof cell === "string" ? { text: cell } : cell;
 }
 
 function call(name: string, args: readonly string[]): string {

@@ -22,6 +22,7 @@ export class FakeHost {
   readonly settings = new Map<string, unknown>();
   readonly tables: Record<string, Table[]> = {};
   readonly complaints: string[] = [];
+  readonly charts: Record<string, unknown>[] = [];
   names: Record<string, string> = {};
   shown = { sheet: "", address: "A1" };
   mostCellsAtOnce = 0;
@@ -114,6 +115,9 @@ export class FakeHost {
         if (used.length === 0) return hostObject(batch, missing);
         return range(corner(used, Math.min), corner(used, Math.max));
       },
+      charts: {
+        add: (kind: string, source: { at: string }, seriesBy: string) => this.chart(batch, kind, source.at, seriesBy),
+      },
       tables: hostObject(batch, () => ({
         items: (this.tables[name] ?? []).map(({ columns, ...table }) => ({
           name: table.name,
@@ -139,6 +143,7 @@ export class FakeHost {
     // Only what is asked for is made: a whole sheet has more cells than there is memory.
     const facts = (asked: ReadonlySet<string>) => (asked.has("formulas") ? { ...place, ...content() } : place);
     return hostObject(batch, facts, {
+      at: `${sheet}!${address}`,
       worksheet: hostObject(batch, () => ({ name: sheet })),
       clear: () => batch.waiting.push(() => this.cells(sheet).clear()),
       select: () => batch.waiting.push(() => (this.shown = { sheet, address })),
@@ -148,6 +153,21 @@ export class FakeHost {
       },
       "set formulas": (formulas: unknown[][]) => batch.waiting.push(() => this.type(sheet, from, formulas)),
     });
+  }
+
+  /** What is set on a chart before the next sync. */
+  private chart(batch: Batch, kind: string, source: string, seriesBy: string) {
+    const chart = {
+      title: { text: "" },
+      legend: { visible: true },
+      axes: {
+        categoryAxis: { title: { text: "" }, scaleType: "Linear" },
+        valueAxis: { title: { text: "" }, scaleType: "Linear" },
+      },
+      setPosition: (from: string, to: string) => Object.assign(chart, { position: `${from}:${to}` }),
+    };
+    batch.waiting.push(() => this.charts.push(Object.assign(chart, { kind, source, seriesBy })));
+    return chart;
   }
 
   private cells(sheet: string): Map<string, Content> {

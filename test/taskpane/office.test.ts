@@ -48,6 +48,41 @@ test("a cell with a value, a formula or a part of a spill is filled, an empty on
   expect(await filled("C1")).toBe(false);
 });
 
+test("one filled cell fills a range", async () => {
+  const filled = (address: string) => workbook.isFilled({ sheet: "Pre clean", address });
+  expect(await filled("B2:D4")).toBe(true);
+  expect(await filled("C1:D9")).toBe(false);
+  host.set("Pre clean", "D4", "=A1", "", "Empty");
+  expect(await filled("C1:D9")).toBe(true);
+});
+
+test("a chart draws the given cells over a measured abscissa, with both axes named", async () => {
+  const at = { from: "F1", to: "M18" };
+  const chart = { sheet: "Pre clean", cells: "A1:B2", title: "WALLFLUX", titleX: "n_e", titleY: "T_e", at };
+  await workbook.addChart({ ...chart, logarithmicX: true });
+  expect(host.charts).toMatchObject([
+    {
+      kind: "XYScatterLinesNoMarkers",
+      source: "Pre clean!A1:B2",
+      seriesBy: "Columns",
+      title: { text: "WALLFLUX" },
+      legend: { visible: false },
+      axes: {
+        categoryAxis: { title: { text: "n_e" }, scaleType: "Logarithmic" },
+        valueAxis: { title: { text: "T_e" }, scaleType: "Linear" },
+      },
+      position: "F1:M18",
+    },
+  ]);
+});
+
+test("a chart of several columns has a legend in place of an axis title", async () => {
+  const at = { from: "F1", to: "M18" };
+  const chart = { sheet: "Pre clean", cells: "A1:C2", title: "EMISSIONLIMIT", titleX: "ion (u)", titleY: "", at };
+  await workbook.addChart({ ...chart, logarithmicX: false });
+  expect(host.charts).toMatchObject([{ legend: { visible: true }, axes: { categoryAxis: { scaleType: "Linear" } } }]);
+});
+
 test("formulas, numbers and text are written as such, and null leaves a cell alone", async () => {
   await workbook.write({ sheet: "Pre clean", address: "A2" }, [["=1+1", null, "-50 V"], [4]]);
   expect(host.row("Pre clean", 2)).toEqual(["=1+1", 3, "'-50 V"]);
