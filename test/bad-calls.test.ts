@@ -21,7 +21,9 @@ const good: Record<string, unknown[]> = {
   CONSTANT: ["e"],
   PLASMAFREQUENCY: [1e16, "Ar+"],
   WALLFIELD: [300, 1e16, 3, 1],
-  EROSIONRATE: [1e20, 0.5, "Si", 2330],
+  EROSIONRATE: [1e20, 0.5, "Si", 2330, "nm/min"],
+  CHILDCURRENT: [300, 1e-3, "Ar+"],
+  RFCHILDCURRENT: [300, 5e-3, "Ar+"],
   NEGATIVEIONBOHMSPEED: [3, "Ar+", 1, 15],
 };
 
@@ -73,6 +75,14 @@ const cases: Case[] = [
   ["DEBYELENGTH", 0, "1e10 cm3", /"cm3" is a unit of volume, not a unit of density; type a density such as 1e16 m\^-3/],
   ["DEBYELENGTH", 1, "3 V", /"V" is a unit of voltage, not a unit of temperature/],
   ["DEBYELENGTH", 1, "5 %", /"%" is a unit of ratio/],
+  [
+    "MEANFREEPATH",
+    0,
+    "5 mT",
+    /^p: "mT" is a unit of magnetic field, not a unit of pressure; write mTorr if that is meant/,
+  ],
+  ["MEANFREEPATH", 2, "25 C", /^T_g: "C" is a unit of charge, not a unit of temperature; write °C if that is meant\.$/],
+  ["EROSIONRATE", 4, "A/min", /^unit: .* the result is an erosion rate, so write Å\/min if that is meant\.$/],
   ["MEANFREEPATH", 0, "10 sccm", /"sccm" in "10 sccm" is not a unit known here/],
   ["MEANFREEPATH", 1, "1e-18 m", /"m" is a unit of length, not a unit of cross-section/],
   ["COLLISIONALBOHMSPEED", 3, "1 mm^2", /not a unit of length/],
@@ -161,6 +171,8 @@ describe("slips that are numbers like any other get a doubtful-input verdict", (
     ["MEANFREEPATH", 0, 50, /^doubtful input: p 50 Pa; mTorr meant\?/],
     ["MEANFREEPATH", 2, 25, /^doubtful input: T_g 25 K; °C or eV meant\?/],
     ["COLLISIONALBOHMSPEED", 3, 25, /^doubtful input: lambda_i 25 m; mm meant\?/],
+    ["CHILDCURRENT", 1, 1.5, /^doubtful input: s 1.5 m; mm meant\?/],
+    ["RFCHILDCURRENT", 1, 5, /^doubtful input: s_m 5 m; mm meant\?/],
     ["DEBYELENGTH", 0, 46357, /^doubtful input: n_e 46400 m⁻³/],
     ["EDGEDECAYLENGTH", 3, 4, /doubtful input: u_0 4 m\/s; km\/s meant\?/],
   ] as Case[])("%s, argument %i: %o", (call, position, given, says) => {

@@ -92,6 +92,8 @@ export const quantities = {
   voltage,
   /** A distance that may be zero, such as the depth in a profile. */
   distance: { ...length, name: "distance", ...notNegative } as Quantity,
+  /** Of a sheath: a fraction of a millimetre to decimetres, so that one typed in mm is noticed. */
+  width: { ...length, name: "width", band: { low: 1e-6, high: 1, above: "mm meant?" } } as Quantity,
   /** A potential drop given without its sign. */
   drop: { ...voltage, name: "voltage", example: "300 V" } as Quantity,
   energy: quantity("energy", "eV", "15 eV", { ...notNegative, thermal: true, band: { low: 0, high: 1e6 } }),

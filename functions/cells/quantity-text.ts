@@ -172,8 +172,20 @@ function wrongUnit(name: string, quantity: Quantity, typed: string, unitText: st
   return badInput(
     name,
     `"${shorten(unitText)}" is ${kindOf(unit)}, not a unit of ${quantity.name || "number"}`,
-    expected,
+    spelledOut(quantity, unitText) ?? expected,
   );
+}
+
+/** What a trade writes for short where the symbol is another unit's, and what is read for it. */
+const shorthand: readonly [quantity: string, written: RegExp, read: string][] = [
+  ["pressure", /^(m?)T$/, "$1Torr"],
+  ["temperature", /^C$/, "°C"],
+  ["erosion rate", /^A(?=\s*\/)/, "Å"],
+];
+
+function spelledOut(quantity: Quantity, unitText: string): string | undefined {
+  const found = shorthand.find(([name, written]) => name === quantity.name && written.test(unitText));
+  return found && `write ${unitText.replace(found[1], found[2])} if that is meant`;
 }
 
 /** The output unit that [unit] asks for, or why it can't be had. */
@@ -182,7 +194,8 @@ export function readOutputUnit(quantity: Quantity, text: string): Conversion | F
   if (conversion) return conversion;
   const unit = parseUnit(text.trim());
   const given = unit ? `"${shorten(text)}" is ${kindOf(unit)}` : `"${shorten(text)}" is not a unit known here`;
-  return badInput("unit", given, `the result is ${article(quantity.name)}, so type a unit such as ${quantity.unit}`);
+  const wanted = spelledOut(quantity, text.trim()) ?? `type a unit such as ${quantity.unit}`;
+  return badInput("unit", given, `the result is ${article(quantity.name)}, so ${wanted}`);
 }
 
 const kinds: [string, string][] = [

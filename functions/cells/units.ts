@@ -70,6 +70,7 @@ const spellings: Record<string, string> = {
   mtorr: "mTorr",
   TORR: "Torr",
   mTORR: "mTorr",
+  millitorr: "mTorr",
   gauss: "G",
   Gauss: "G",
   kgauss: "kG",

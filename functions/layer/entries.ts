@@ -20,7 +20,7 @@ import { drop, fieldAtWall } from "./twins";
 
 const first = { "1.0.0": "first version" };
 const closedForm = "closed form, 4 ulp";
-const s = quantityInput("s", quantities.length);
+const s = quantityInput("s", quantities.width);
 const motion = optional(wordInput("model", model.ionMotions), "collisionless");
 const path = optional(lambda_i);
 const inDebyeSphere = manyInDebyeSphere((_V_s, n_edge, T_e) => [n_edge, T_e]);

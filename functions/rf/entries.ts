@@ -27,7 +27,7 @@ const closedForm = "closed form, 4 ulp";
 /** The mean drop across the sheath, a magnitude: no drop at all is a blank, not a sheath. */
 const V_dc = quantityInput("V_dc", quantities.drop, { zeroIsValue: false });
 const V_rf = quantityInput("V_rf", quantities.amplitude);
-const s_m = quantityInput("s_m", quantities.length);
+const s_m = quantityInput("s_m", quantities.width);
 
 export const RFFLOATINGSHIFT = entry("RFFLOATINGSHIFT", {
   inputs: [V_rf, T_e],
@@ -43,7 +43,7 @@ export const RFFLOATINGSHIFT = entry("RFFLOATINGSHIFT", {
 });
 
 export const IONENERGYSPREAD = entry("IONENERGYSPREAD", {
-  inputs: [V_dc, V_rf, quantityInput("s", quantities.length), quantityInput("f", quantities.frequency), ionInput()],
+  inputs: [V_dc, V_rf, quantityInput("s", quantities.width), quantityInput("f", quantities.frequency), ionInput()],
   result: quantities.energy,
   compute: (V_dc, V_rf, s, f, ion) => model.ionEnergySpread(Math.abs(V_dc), V_rf, s, f, ion),
   equation: String.raw`\Delta E = \frac{8 Z V_\mathrm{rf}}{3\,\omega s} \sqrt{\frac{2 Z e V_\mathrm{dc}}{M}} \;\le\; 2 Z V_\mathrm{rf}, \qquad \omega = 2\pi f`,
