@@ -199,7 +199,7 @@ function chuck(): SheetModel {
     book
       .type(`D${r}`, `${300 + 10 * i} V`)
       .type(`E${r}`, Number((8e15 * (1 + 0.05 * i)).toPrecision(3)))
-      .type(`F${r}`, Number((3 + 0.03 * i).toFixed(2)));
+      .type(`F${r}`, Number((2 + 0.01 * i).toFixed(2)));
     book.formula(`G${r}`, `=SHEATH.MEANFREEPATH(B${r}&" mTorr","Ar")`, (at) =>
       one("MEANFREEPATH", `${String(at(`B${r}`) ?? "")} mTorr`, "Ar"),
     );

@@ -187,7 +187,7 @@ export const faults: readonly Plant[] = [
   typedFault("row outside a limit: electrons too hot", ["fails"], [[chamber, "D"]], (_, pick) => 26 + pick(10)),
   typedFault("row outside a limit: voltage too low", ["fails"], [[runs, "B"]], (_, pick) => 20 + pick(80)),
   typedFault("row outside a limit: grazing field", ["fails"], [[tile, "E"]], (_, pick) => 0.3 + 0.04 * pick(15)),
-  typedFault("row outside a limit: RF sheath too low", ["fails"], [[driven, "C"]], (_, pick) => -5 - pick(20)),
+  typedFault("row outside a limit: RF sheath too low", ["fails"], [[driven, "C"]], (_, pick) => -5 - pick(14)),
   typedFault(
     "measured value far off",
     ["check"],
