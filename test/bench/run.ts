@@ -5,11 +5,13 @@ import { cells } from "./cells";
 import { checks } from "./checks";
 import { findings } from "./findings";
 import type { Row } from "./measure";
+import { trial } from "./trial";
 
 const sections: Record<string, () => Row[] | Promise<Row[]>> = {
   "Coming through cells": cells,
   Checks: checks,
   "Looking through workbooks": findings,
+  "Trial sheet": trial,
 };
 
 const wanted = process.argv[2]?.toLowerCase();

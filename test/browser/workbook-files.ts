@@ -43,7 +43,8 @@ export function contents({ sheets }: FileBook): Record<string, Omit<FileCell, "s
       cells.flatMap((row, i) =>
         (row ?? []).flatMap((cell, column) => {
           if (!cell || (cell.value === null && !cell.formula)) return [];
-          const { style: _, ...content } = cell;
+          const { value, formula, fills } = cell;
+          const content = { value, ...(formula && { formula }), ...(fills && { fills }) };
           return [[`${name}!${a1({ row: i, column })}`, content]];
         }),
       ),

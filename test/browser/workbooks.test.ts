@@ -8,6 +8,7 @@ import type { FileBook } from "../../taskpane/workbook/xlsx-book";
 import { readBook } from "../../taskpane/workbook/xlsx-read";
 import { writeBook } from "../../taskpane/workbook/xlsx-write";
 import { findLibreOffice } from "../twin/find-libreoffice";
+import { longBook } from "../workbooks/long-book";
 import { savedByLibreOffice } from "../workbooks/libreoffice";
 import { cell, enter, openTrial } from "./trial-sheet";
 import { contents, notice, offer, openFile, saveCopy } from "./workbook-files";
@@ -91,6 +92,21 @@ describe("each sample, opened, edited, saved, and opened again", () => {
       expect(calls).toBeGreaterThan(5);
     });
   });
+});
+
+test("a workbook of 20,000 rows opens, is calculated anew, follows an edit, and is saved", async () => {
+  const page = await openTrial();
+  await openFile(page, "long.xlsx", longBook(20_000));
+  await expect.poll(() => notice(page).innerText(), { timeout: 30_000 }).toContain("“long” is open");
+  // NRL Plasma Formulary: 7.43×10² √(T/n) cm, T in eV and n in cm⁻³; row 20,001 holds 2×10¹⁵ m⁻³ and 4 eV.
+  const debye = 7.43 * Math.sqrt(4 / 2e9);
+  await expect.poll(() => cell(page, "C20001", "Long"), { timeout: 30_000 }).toBeCloseTo(debye, 6);
+  expect(await cell(page, "D20001", "Long")).toBe(8);
+  await page.evaluate(() => window.wallfallWorkbook.write({ sheet: "Long", address: "B20001" }, [[16]]));
+  await expect.poll(() => cell(page, "C20001", "Long"), { timeout: 30_000 }).toBeCloseTo(2 * debye, 6);
+  const { book } = await saveCopy(page);
+  expect(book.sheets[0].cells[20_000]![2]!.value).toBeCloseTo(2 * debye, 6);
+  expect(book.sheets[0].cells[1]![2]).toMatchObject({ fills: "C2:C20001" });
 });
 
 /** LibreOffice saves 15 digits. */
