@@ -4,6 +4,7 @@ import os from "node:os";
 import { cells } from "./cells";
 import { checks } from "./checks";
 import { findings } from "./findings";
+import { fillDown } from "./fill-down";
 import type { Row } from "./measure";
 import { trial } from "./trial";
 
@@ -11,6 +12,7 @@ const sections: Record<string, () => Row[] | Promise<Row[]>> = {
   "Coming through cells": cells,
   Checks: checks,
   "Looking through workbooks": findings,
+  "Calls filled down": fillDown,
   "Trial sheet": trial,
 };
 
