@@ -30,8 +30,9 @@ export function isBlank(input: Input, cell: unknown): boolean {
 export function readColumn(input: Input, cells: Cells): Column {
   if (input.kind === "block") return readBlock(input, cells);
   const shape = shapeOf(cells);
-  const isNumber = input.kind === "quantity" && !input.words && (!input.optional || typeof input.blank === "number");
-  return isNumber ? readNumbers(input, cells, shape) : readAny(input, cells, shape);
+  // A lone cell gains nothing from the quick way, and what it may hold would teach the compiler to expect anything there.
+  const isLong = shape.rows * shape.columns > 1;
+  return (isLong && input.kind === "quantity" && readNumbers(input, cells, shape)) || readAny(input, cells, shape);
 }
 
 function readAny(input: Input, cells: Cells, shape: Shape): Column {
@@ -48,13 +49,15 @@ function readAny(input: Input, cells: Cells, shape: Shape): Column {
   return { values, shape, odd };
 }
 
-function readNumbers(input: Input, cells: Cells, shape: Shape): Column {
+/** The quick way, for cells that are numbers or have no value; undefined where a blank or a word stands for something else. */
+function readNumbers(input: Input, cells: Cells, shape: Shape): Column | undefined {
   const values = take(shape.rows * shape.columns);
   let odd: Column["odd"];
   for (let from = 0; (from = copyNumbers(input, cells, shape, values, from)) < values.length; from++) {
     const value = readCell(input, cells[Math.floor(from / shape.columns)][from % shape.columns]);
     if (typeof value === "number") values[from] = value;
-    else (odd ??= new Map()).set(from, value as typeof BLANK | CellError);
+    else if (value === BLANK || isError(value)) (odd ??= new Map()).set(from, value as typeof BLANK | CellError);
+    else return undefined;
   }
   return { values, shape, odd };
 }

@@ -45,8 +45,8 @@ export function unexpected(error: unknown): Fault {
  * than the physics. A column of one value has step 0 and stays where it is.
  */
 function caller(compute: Compute, columns: readonly Values[]): (row: number) => unknown {
-  const [a, b, c, d, e, f, g, h] = columns;
-  const [p, q, r, s, t, u, v, w] = columns.map((values) => (values.length === 1 ? 0 : 1));
+  const [a, b, c, d, e, f, g, h, k] = columns;
+  const [p, q, r, s, t, u, v, w, x] = columns.map((values) => (values.length === 1 ? 0 : 1));
   switch (columns.length) {
     case 1:
       return (i) => compute(a[i * p]);
@@ -64,6 +64,8 @@ function caller(compute: Compute, columns: readonly Values[]): (row: number) => 
       return (i) => compute(a[i * p], b[i * q], c[i * r], d[i * s], e[i * t], f[i * u], g[i * v]);
     case 8:
       return (i) => compute(a[i * p], b[i * q], c[i * r], d[i * s], e[i * t], f[i * u], g[i * v], h[i * w]);
+    case 9:
+      return (i) => compute(a[i * p], b[i * q], c[i * r], d[i * s], e[i * t], f[i * u], g[i * v], h[i * w], k[i * x]);
     default:
       return (i) => compute(...columns.map((values) => values[values.length === 1 ? 0 : i]));
   }
