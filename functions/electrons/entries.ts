@@ -36,7 +36,13 @@ export const HOTELECTRONPOTENTIAL = entry("HOTELECTRONPOTENTIAL", {
       const ofHigh = T_h >= T_c ? hot : 1 - hot;
       return [ofHigh > 0 ? bodyRatio((1 - ofHigh) / ofHigh, high / low) : 0, high / low];
     }),
-    maxwellianTail((T_c, T_h, hot, ion) => ({ V_w: twoGroups(T_c, T_h, hot, ion), T_e: T_c, ion, T_i: undefined })),
+    // The electrons that cross so large a drop are those of the hotter group.
+    maxwellianTail((T_c, T_h, hot, ion) => ({
+      V_w: twoGroups(T_c, T_h, hot, ion),
+      T_e: hot > 0 ? Math.max(T_c, T_h) : T_c,
+      ion,
+      T_i: undefined,
+    })),
   ],
   sources: [R91, LL],
   changes: first,

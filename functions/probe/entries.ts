@@ -1,12 +1,12 @@
 import { edge_ratio, n_bulk, T_e } from "../cells/common-inputs";
-import { entry, type Family } from "../cells/entry";
+import { entry, NotTested, type Family } from "../cells/entry";
 import { Fault, noSolution } from "../cells/fault";
 import { format } from "../cells/format";
 import { ionInput, optional, quantityInput, wordInput } from "../cells/inputs";
 import { quantities } from "../cells/quantities";
 import { seriesInput } from "../cells/series";
 import { C03, LL, MSL26 } from "../sources";
-import { weakIonEmission } from "../wall/limits";
+import { maxwellianTail, weakIonEmission } from "../wall/limits";
 import { fitSweeps } from "./fitted-sweeps";
 import { ionsSaturate, longRetarding, longWire, noRfPickup, temperatureCertain, thinSheath, thinWire } from "./limits";
 import * as model from "./model";
@@ -24,7 +24,8 @@ const V = quantityInput("V", quantities.drop, { zeroIsValue: false });
 export const PROBEDENSITY = entry("PROBEDENSITY", {
   inputs: [
     quantityInput("I_sat", quantities.current, { zeroIsValue: false }),
-    quantityInput("area", quantities.area),
+    // A probe larger than a hand is a slip: 1 typed for 1 mm².
+    quantityInput("area", quantities.area, { band: { low: 1e-10, high: 0.05, above: "mm² meant?" } }),
     T_e,
     ionInput(),
     edge_ratio,
@@ -42,7 +43,7 @@ export const PROBEDENSITY = entry("PROBEDENSITY", {
       radius,
     ]),
     weakIonEmission("γ_ion left out", (_I, _A, _T, _ion, _ratio, gamma_ion) =>
-      gamma_ion === undefined ? undefined : 0,
+      gamma_ion === undefined ? new NotTested("gamma_ion") : 0,
     ),
   ],
   sources: [LL, C03],
@@ -73,6 +74,12 @@ export const PROBETEMPERATURE = entry("PROBETEMPERATURE", {
           `${ion.label} is as fast as the electrons, so no probe floats below the plasma; check ion and edge_ratio.`,
         );
   },
+  limits: [
+    maxwellianTail((V_p, V_f, ion, from, edge_ratio) => {
+      const depth = model.floatingDepth(ion, from === "edge" ? 1 : edge_ratio);
+      return { V_w: V_f - V_p, T_e: (V_p - V_f) / depth, ion, T_i: undefined };
+    }),
+  ],
   equation: String.raw`T_e = \frac{V_p - V_f}{\ln\sqrt{\dfrac{M}{2\pi m Z}} - \ln\dfrac{n_\mathrm{edge}}{n_\mathrm{bulk}}}`,
   sources: [LL, C03],
   changes: first,
