@@ -1,4 +1,4 @@
-import { a1, cornersOf, type Cell } from "../workbook/address";
+import { a1, cellsIn as cellsOfRange, cornersOf, type Cell } from "../workbook/address";
 
 /** A rectangle of cells on one sheet; rows and columns are counted from 0. */
 export interface Area extends Cell {
@@ -71,13 +71,7 @@ export function rangesText(areas: readonly Area[], most = 6): string {
 
 /** All cells of ranges written by rangesText without a bound. */
 export function cellsIn(ranges: string): Cell[] {
-  return ranges.split(", ").flatMap((range) => {
-    const { from, to } = cornersOf(range);
-    const cells: Cell[] = [];
-    for (let column = from.column; column <= to.column; column++)
-      for (let row = from.row; row <= to.row; row++) cells.push({ row, column });
-    return cells;
-  });
+  return ranges.split(", ").flatMap(cellsOfRange);
 }
 
 /** Areas met one by one, kept as few: one right below the last of its columns joins it, one met before is let go. */

@@ -31,6 +31,12 @@ export class Sheet {
     }
   }
 
+  /** One past the last column of a row; rows may be of very different lengths. */
+  lengthOf(row: number): number {
+    const cells = this.content.values[row - this.row];
+    return cells ? this.column + cells.length : 0;
+  }
+
   value(row: number, column: number): CellContent {
     return this.content.values[row - this.row]?.[column - this.column] ?? null;
   }

@@ -1,7 +1,7 @@
-import { pack, rangesText, rectanglesOf, type Packed } from "./area";
+import { pack, type Packed } from "./area";
 import type { Fill } from "./fill";
 import type { Origin, Traces } from "./judge";
-import type { Draft, Tally } from "./tally";
+import type { Facts, Tally } from "./tally";
 
 /** Notes an error that a cell shows: its own with its message, or one that came from another cell. */
 export function noteError(cell: Packed, error: unknown, fill: Fill, tally: Tally, traces: Traces): void {
@@ -11,21 +11,24 @@ export function noteError(cell: Packed, error: unknown, fill: Fill, tally: Tally
   if (from) return noteOrigin(cell, from, fill, tally);
   const kind = kindOf(message ?? "");
   const what = message ? `${code} ${message}` : code;
-  tally
-    .draft(`error|${sheet}|${code}|${kind}`, () => ({ cause: "error", sheet, what, subject: code + kind }))
-    .in(fill, fill.calls, () => fill.cells.length)
-    .add(cell);
+  // What one column of inputs causes is one finding, whatever formulas read it.
+  const place = traces.input(error);
+  const key = place ? `${place.sheet}|${place.column}` : String(fill.id);
+  const facts = (): Facts => ({ cause: "error", sheet, what, subject: `${code}|${kind}`, fromSheet: place?.sheet });
+  const draft = tally
+    .draft(`error|${sheet}|${key}|${code}|${kind}`, facts)
+    .in(fill, fill.calls, () => fill.cells.length);
+  if (place) draft.from(pack(place.row, place.column));
+  draft.add(cell);
 }
 
 /** Errors that come from one column are one finding, whatever cells show them. */
 function noteOrigin(cell: Packed, from: Origin, fill: Fill, tally: Tally): void {
   const { sheet } = fill;
-  const key = `passed|${sheet}|${from.sheet}|${from.column}|${from.code}`;
-  const place = ({ origins }: Draft) =>
-    (from.sheet === sheet ? "" : `${from.sheet}!`) + rangesText(rectanglesOf(from.sheet, origins), 4);
-  const what = (draft: Draft) => `${from.code} comes from ${place(draft)}; mend that first`;
+  const subject = `${from.sheet}|${from.column}|${from.code}`;
+  const what = `${from.code} of another cell is passed on; mend that cell first`;
   tally
-    .draft(key, () => ({ cause: "passed", sheet, what, subject: `${from.sheet}|${from.column}|${from.code}` }))
+    .draft(`passed|${sheet}|${subject}`, () => ({ cause: "passed", sheet, what, subject, fromSheet: from.sheet }))
     .in(fill, fill.calls, () => fill.cells.length)
     .from(pack(from.row, from.column))
     .add(cell);
@@ -33,5 +36,6 @@ function noteOrigin(cell: Packed, from: Origin, fill: Fill, tally: Tally): void 
 
 /** Messages that differ only in what was typed are of one kind. */
 function kindOf(message: string): string {
-  return message.replace(/"[^"]*"/g, '""').replace(/[+-−]?\d[\d.,]*(e[+-]?\d+)?/gi, "0");
+  const bare = message.replace(/^\w+(?=:| is blank)/, "");
+  return bare.replace(/"[^"]*"/g, '""').replace(/[+-−]?\d[\d.,]*(e[+-]?\d+)?/gi, "0");
 }

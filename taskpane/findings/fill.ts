@@ -1,4 +1,5 @@
 import type { Input } from "../../functions/cells/inputs";
+import type { Word } from "../../functions/cells/verdict";
 import { Areas, pack, rangesText, rectanglesOf, type Area, type Packed } from "./area";
 
 /** What the calls of a fill read at one place of their arguments. */
@@ -18,9 +19,10 @@ export class Fill {
   readonly rows: number[] = [];
   /** By call and argument: what was read there. */
   readonly inputs = new Map<string, ReadInput>();
-  /** How many cells hold the formula. */
-  formulas = 0;
-
+  /** The cells that hold the formula themselves. */
+  readonly anchors: Packed[] = [];
+  /** Rows of inputs by what their limits say at worst. */
+  readonly verdicts: Record<Word, number> = { holds: 0, marginal: 0, fails: 0, "not tested": 0 };
   constructor(
     readonly id: number,
     readonly sheet: string,
@@ -31,7 +33,7 @@ export class Fill {
   ) {}
 
   add(area: Area): void {
-    this.formulas++;
+    this.anchors.push(pack(area.row, area.column));
     for (let i = 0; i < area.rows; i++)
       for (let j = 0; j < area.columns; j++) this.cells.push(pack(area.row + i, area.column + j));
   }
@@ -43,10 +45,15 @@ export class Fill {
     read.areas.add(area);
   }
 
+  get formulas(): number {
+    return this.anchors.length;
+  }
+
   get areas(): Area[] {
     return rectanglesOf(this.sheet, this.cells);
   }
 
+  /** The cells as ranges, the first few. */
   get range(): string {
     return rangesText(this.areas);
   }

@@ -19,6 +19,8 @@ export interface Finding {
   what: string;
   /** How far, and where it is worst: a number with its bounds, a message, two values. */
   detail?: string;
+  /** The cells that are to blame, where those are others. */
+  from?: { sheet: string; cells: string };
   /** Changes whenever the finding does: cells, numbers or words. */
   print: string;
 }

@@ -5,7 +5,7 @@ import { oddResult, readInputs, type Reading } from "../../functions/cells/evalu
 import { Fault } from "../../functions/cells/fault";
 import { isCellError } from "../../functions/cells/host";
 import { doubtOf, type Input } from "../../functions/cells/inputs";
-import { judgeAll, verdictText, type Verdict } from "../../functions/cells/verdict";
+import { judgeAll, verdictText, worst, type Verdict } from "../../functions/cells/verdict";
 import { pack, type Packed } from "./area";
 import type { FoundError } from "./book";
 import type { Fill } from "./fill";
@@ -26,9 +26,7 @@ export interface Judged {
 /** Notes limits that do not hold, inputs that are doubted and blanks that some hosts take for 0; traces incoming errors. */
 export function judgeCall(judged: Judged, result: Cells, traces: Traces): void {
   const { entry, args, fill, call } = judged;
-  entry.inputs.forEach((input: Input, k: number) => {
-    judgeDoubts(judged, input, args[k]);
-  });
+  entry.inputs.forEach((input: Input, k: number) => judgeDoubts(judged, input, args[k]));
   const reading = readInputs(
     entry.inputs,
     args.map((arg) => arg?.cells),
@@ -48,42 +46,77 @@ function filledRows(result: Cells, { rows, columns }: Shape): number {
   return count;
 }
 
-export type Origin = FoundError["from"] & { code: string };
+export type Place = FoundError["from"];
+/** The cell that an error came from, and what it shows. */
+export type Origin = Place & { code: string };
 
 /** Where error cells of results come from, by the error itself: a message does not travel from cell to cell. */
 export class Traces {
   private readonly origins = new WeakMap<object, Origin>();
+  private readonly inputs = new WeakMap<object, Place>();
 
+  /** The cell whose error was passed on. */
   origin(error: unknown): Origin | undefined {
     const { code, from } = error as Partial<FoundError>;
     return from ? { ...from, code: code! } : this.origins.get(error as object);
   }
 
-  pass(error: unknown, from: Origin): void {
-    if (!this.origin(error)) this.origins.set(error as object, from);
+  /** The cell that holds what could not be used. */
+  input(error: unknown): Place | undefined {
+    return this.inputs.get(error as object);
+  }
+
+  passedOn(error: object, from: Origin): void {
+    this.origins.set(error, from);
+  }
+
+  readFrom(error: object, place: Place): void {
+    this.inputs.set(error, place);
   }
 }
 
-function traceErrors({ args, entry }: Judged, result: Cells, shape: Shape, traces: Traces): void {
-  if (!args.some((arg) => arg?.cells.some((row) => row.some(isCellError)))) return;
+function traceErrors(judged: Judged, result: Cells, shape: Shape, traces: Traces): void {
   const own = shapeOf(result);
   for (let i = 0; i < own.rows; i++) {
     for (let j = 0; j < own.columns; j++) {
       if (!isCellError(result[i][j])) continue;
-      const incoming = args.flatMap((arg, k) => {
-        if (!arg) return [];
-        const isWhole = entry.inputs[k]?.kind === "block" || k >= entry.inputs.length;
-        return (isWhole ? arg.cells.flat() : [cellOrNone(arg.cells, i, j, shape)]).filter(isCellError);
-      });
-      const from = incoming.map((error) => traces.origin(error)).find((each) => each !== undefined);
-      if (from) traces.pass(result[i][j], from);
+      // One error may stand in many cells; each needs its own trace.
+      const { code, message } = result[i][j] as { code: string; message?: string };
+      const error = (result[i][j] = { code, message });
+      const at: [number, number] = [shape.rows === 1 ? 0 : i, shape.columns === 1 ? 0 : j];
+      const from = incoming(judged, at, traces);
+      if (from) traces.passedOn(error, from);
+      else {
+        const place = blamed(judged, at, message ?? "");
+        if (place) traces.readFrom(error, place);
+      }
     }
   }
 }
 
-/** A table's rows are those of its inputs only where there are as many. */
-function cellOrNone(cells: Cells, i: number, j: number, { rows, columns }: Shape): unknown {
-  return cellIn(cells, rows === 1 ? 0 : i, columns === 1 ? 0 : j);
+/** The first argument that is an error in this row; of one that is read whole, any of its cells. */
+function incoming({ args, entry }: Judged, [i, j]: [number, number], traces: Traces): Origin | undefined {
+  for (const [k, arg] of args.entries()) {
+    if (!arg) continue;
+    const isWhole = entry.inputs[k]?.kind === "block" || k >= entry.inputs.length;
+    const cells = isWhole ? arg.cells.flat() : [cellIn(arg.cells, i, j)];
+    for (const cell of cells) {
+      const origin = isCellError(cell) ? traces.origin(cell) : undefined;
+      if (origin) return origin;
+    }
+  }
+  return undefined;
+}
+
+/** A message begins with the name of the input it is about. */
+function blamed({ args, entry }: Judged, [i, j]: [number, number], message: string): Place | undefined {
+  const k = entry.inputs.findIndex(
+    ({ name }: Input) => message.startsWith(`${name}:`) || message.startsWith(`${name} is blank`),
+  );
+  const { cells, area } = args[k] ?? {};
+  if (!cells || !area || entry.inputs[k].kind === "block") return undefined;
+  const row = area.row + (cells.length === 1 ? 0 : i);
+  return { sheet: area.sheet, row, column: area.column + (cells[0].length === 1 ? 0 : j) };
 }
 
 function judgeDoubts({ cellAt, fill, call, tally, entry }: Judged, input: Input, arg: Known | undefined): void {
@@ -177,7 +210,10 @@ function judgeLimits(judged: Judged, reading: Reading, result: Cells): void {
       const index = i * shape.columns + j;
       // A row without a result is an error already.
       if (odd?.[index] || isCellError(cellIn(result, i, j))) continue;
-      for (const verdict of judgeAll(entry, valuesAt(reading, index))) noteVerdict(judged, verdict, cellAt(i, j));
+      const verdicts = judgeAll(entry, valuesAt(reading, index));
+      for (const verdict of verdicts) noteVerdict(judged, verdict, cellAt(i, j));
+      const most = worst(verdicts);
+      if (most) judged.fill.verdicts[most.word]++;
     }
   }
 }
@@ -185,7 +221,7 @@ function judgeLimits(judged: Judged, reading: Reading, result: Cells): void {
 function noteVerdict({ entry, fill, call, tally }: Judged, verdict: Verdict, cell: Packed): void {
   const { limit, word, value } = verdict;
   if (word !== "fails" && word !== "marginal") return;
-  const what = word === "fails" ? limit.reason : limit.assumption;
+  const what = word === "fails" ? limit.reason : `marginal: ${limit.assumption}`;
   const subject = `${entry.name}|${limit.assumption}`;
   const beyond = limit.holds >= limit.fails ? -value! : value!;
   tally

@@ -95,7 +95,7 @@ function outcome(book: Book, { fills: byForm, tally, notFollowed }: Recalculatio
     findings: tally.findings(book.sheets.map(({ name }) => name)),
     notFollowed: [...notFollowed.values()].map(({ fill: { sheet }, cells, why }) => ({
       sheet,
-      cells: rangesText(rectanglesOf(sheet, cells)),
+      cells: rangesText(rectanglesOf(sheet, cells), Infinity),
       count: cells.length,
       why,
     })),
@@ -111,7 +111,7 @@ function usesIn(fills: readonly Fill[]): Use[] {
       const use = uses.get(name) ?? { function: name, calls: 0, where: [] };
       uses.set(name, use);
       use.calls += fill.formulas * fill.calls.filter((each) => each === name).length;
-      use.where.push({ sheet: fill.sheet, cells: fill.range });
+      use.where.push({ sheet: fill.sheet, cells: rangesText(fill.areas, Infinity) });
     }
   }
   return [...uses.values()].sort((a, b) => b.calls - a.calls);

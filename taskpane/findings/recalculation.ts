@@ -32,7 +32,7 @@ export class Recalculation {
   readonly parser = new Parser();
   readonly tally = new Tally();
   readonly fills = new Map<string, Fill>();
-  /** By fill: why its cells could not be computed again. */
+  /** By sheet: why cells could not be computed again. */
   readonly notFollowed = new Map<string, { fill: Fill; why: string; cells: Packed[] }>();
   private readonly traces = new Traces();
   private readonly known = new Map<Sheet, Map<Packed, Parsed>>();
@@ -121,13 +121,13 @@ export class Recalculation {
 
   private noteUnseen(sheet: Sheet, { row, column }: Area, fill: Fill, why: string): void {
     const cell = pack(row, column);
-    const key = `${fill.id}|${why}`;
+    const key = `${fill.sheet}|${why}`;
     const known = this.notFollowed.get(key);
     if (known) known.cells.push(cell);
     else this.notFollowed.set(key, { fill, why, cells: [cell] });
-    const saved = sheet.argument(row, column);
-    // The error it shows is not known to come from elsewhere, so its place is left out.
-    if (isCellError(saved)) noteError(cell, { ...(saved as object), from: undefined }, fill, this.tally, this.traces);
+    const saved = sheet.value(row, column);
+    if (typeof saved === "object" && saved !== null)
+      noteError(cell, { code: saved.error, message: saved.message }, fill, this.tally, this.traces);
   }
 
   private noteResult(sheet: Sheet, filled: Area, fill: Fill, { cells }: Known, expression: Expression): void {

@@ -8,21 +8,21 @@ import { fingerprint } from "./fingerprint";
 export interface Facts {
   cause: Cause;
   sheet: string;
-  /** In words; where they depend on all that is found, they are asked for at the end. */
-  what: string | ((draft: Draft) => string);
+  what: string;
   /** What tells it from others of its cause in the same column; `what` itself where that never changes. */
   subject?: string;
+  /** Where the cells that are to blame stand. */
+  fromSheet?: string;
 }
 
 /** What is being found of one kind in one place; cells are added as they are met. */
 export class Draft {
   readonly cells: Packed[] = [];
-  /** Where it comes from, when that is other cells. */
-  readonly origins: Packed[] = [];
+  private readonly origins: Packed[] = [];
   private readonly met = new Set<Packed>();
   private readonly functions = new Set<string>();
   private readonly looked = new Map<number, () => number>();
-  private worst?: { cell: Packed; badness: number; detail?: string };
+  private worst?: { cell: Packed; badness: number; detail?: () => string };
 
   constructor(readonly facts: Facts) {}
 
@@ -37,6 +37,7 @@ export class Draft {
     return this;
   }
 
+  /** Names a cell that is to blame, on the sheet that the facts name for that. */
   from(cell: Packed): this {
     this.origins.push(cell);
     return this;
@@ -48,7 +49,7 @@ export class Draft {
     this.met.add(cell);
     this.cells.push(cell);
     if (this.worst && badness <= this.worst.badness) return;
-    this.worst = { cell, badness, detail: detail?.() };
+    this.worst = { cell, badness, detail };
   }
 
   has(cell: Packed): boolean {
@@ -56,10 +57,11 @@ export class Draft {
   }
 
   finding(key: string): Finding {
-    const { cause, sheet } = this.facts;
-    const { cell, detail } = this.worst!;
-    const what = this.what;
+    const { cause, sheet, what } = this.facts;
+    const { cell } = this.worst!;
+    const detail = this.worst!.detail?.();
     const cells = rangesText(rectanglesOf(sheet, this.cells), Infinity);
+    const from = this.blamed;
     return {
       key,
       cause,
@@ -71,13 +73,15 @@ export class Draft {
       functions: [...this.functions],
       what,
       ...(detail === undefined ? {} : { detail }),
-      print: fingerprint([cells, what, detail ?? ""]),
+      ...(from === undefined ? {} : { from }),
+      print: fingerprint([cells, what, detail ?? "", from?.cells ?? ""]),
     };
   }
 
-  private get what(): string {
-    const { what } = this.facts;
-    return typeof what === "string" ? what : what(this);
+  private get blamed(): Finding["from"] {
+    if (this.origins.length === 0) return undefined;
+    const sheet = this.facts.fromSheet ?? this.facts.sheet;
+    return { sheet, cells: rangesText(rectanglesOf(sheet, this.origins), Infinity) };
   }
 
   /** Cells of several fills have no number in common to be counted against. */
@@ -88,7 +92,7 @@ export class Draft {
 
   /** What stays the same when rows are added or numbers change. */
   get identity(): string {
-    const { cause, sheet, subject = this.what } = this.facts;
+    const { cause, sheet, what, subject = what } = this.facts;
     return [cause, sheet, unpack(this.cells[0]).column, subject].join("|");
   }
 }

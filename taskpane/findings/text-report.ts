@@ -20,7 +20,13 @@ export function textReport(name: string, look: Look, accepted: Accepted): string
       : [
           "",
           "Not followed, so neither computed again nor judged",
-          ...table(look.notFollowed.map(({ sheet, cells, count, why }) => [`${sheet}!${cells}`, String(count), why])),
+          ...table(
+            look.notFollowed.map(({ sheet, cells, count, why }) => [
+              `${sheet}!${placeText({ cells })}`,
+              String(count),
+              why,
+            ]),
+          ),
         ]),
   ].join("\n");
 }

@@ -7,9 +7,18 @@ export function countText({ count, of }: Finding): string {
   return count > 1 ? `all ${count}` : "";
 }
 
-/** What is the matter and how far, in one line. */
-export function findingText({ what, detail }: Finding): string {
-  return detail === undefined ? what : `${what}${what.endsWith("?") ? "" : ":"} ${detail}`;
+/** What is the matter, how far, and which cells are to blame, in one line. */
+export function findingText(finding: Finding): string {
+  const { what, detail, from } = finding;
+  const more = [detail, from && fromText(finding)].filter(Boolean).join("; ");
+  if (more === "") return what;
+  return what.endsWith("?") ? `${what} ${more}` : `${what.replace(/\.$/, "")}: ${more}`;
+}
+
+/** "from D18", or "from Inputs!B2" where that is another sheet. */
+export function fromText({ sheet, from }: Finding): string {
+  if (!from) return "";
+  return `from ${from.sheet === sheet ? "" : `${from.sheet}!`}${placeText(from)}`;
 }
 
 /** Cells of several ranges can be many: the first few, and how many more. */

@@ -16,7 +16,8 @@ export function functionsView(words: ReadonlyMap<string, Words>, workbook: Workb
   return {
     label: labels.functions,
     home: "",
-    opens: () => true,
+    // All that no other view opens.
+    opens: () => false,
     show(address) {
       const entry = entryNamed(address);
       if (entry) return functionPage(entry, words.get(entry.name), drafts, workbook);

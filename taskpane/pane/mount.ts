@@ -1,6 +1,7 @@
 import "../look.css";
 import type { Workbook } from "../workbook/workbook";
 import { brokenView } from "./broken";
+import { findingsView } from "./findings-view";
 import { functionsView } from "./functions-view";
 import { h, setAttribute } from "./h";
 import { head } from "./head";
@@ -25,7 +26,7 @@ export function mountPane(root: HTMLElement, workbook: Workbook): void {
       );
       return new Map<string, Words>();
     })
-    .then((words) => run(place, [functionsView(words, workbook)]));
+    .then((words) => run(place, [functionsView(words, workbook), findingsView(workbook, root)]));
 }
 
 /** Shows the view that the address asks for, now and whenever the address changes. */

@@ -110,7 +110,7 @@ describe("a long workbook", () => {
     setTimeout(() => stop.abort(), 100);
     await expect(look(content, { signal: stop.signal })).rejects.toBeInstanceOf(Cancelled);
     clearInterval(clock);
-    expect(turns).toBeGreaterThan(2);
+    expect(turns).toBeGreaterThan(1);
     expect(performance.now() - started).toBeLessThan(1500);
   });
 });

@@ -1,5 +1,6 @@
 import { readFileSync } from "node:fs";
 import { expect, test } from "vitest";
+import { causes } from "../../taskpane/findings/causes";
 import { labels } from "../../taskpane/pane/labels";
 
 const rows = readFileSync("taskpane/labels.md", "utf8")
@@ -8,8 +9,9 @@ const rows = readFileSync("taskpane/labels.md", "utf8")
   .slice(2)
   .map((line) => line.split("|").map((cell) => cell.trim()));
 
-test("every label of the pane stands in the list, and no other", () => {
-  expect(rows.map(([, label]) => label).sort()).toEqual([...new Set(Object.values(labels))].sort());
+test("every label of the pane, and every cause of a finding, stands in the list, and no other", () => {
+  const fixed = [...Object.values(labels), ...Object.values(causes)];
+  expect(rows.map(([, label]) => label).sort()).toEqual([...new Set(fixed)].sort());
 });
 
 test("every label has an origin: trade, standard or ours", () => {

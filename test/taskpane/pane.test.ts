@@ -55,9 +55,13 @@ test("the list shows every function of the catalogue with its meaning", async ()
   for (const meaning of all(".functions span")) expect(meaning).not.toBe("");
 });
 
-test("with one view there are no tabs", async () => {
-  await open("");
-  expect(root.querySelector(".tabs")).toBeNull();
+test("two tabs lead to the two views, and the one shown is marked", async () => {
+  await open("findings");
+  const tabs = [...root.querySelectorAll(".tabs a")];
+  expect(tabs.map((tab) => [tab.textContent, tab.getAttribute("href"), tab.getAttribute("aria-current")])).toEqual([
+    ["Functions", "#", null],
+    ["Findings", "#findings", "page"],
+  ]);
 });
 
 test("an address opens that function's page, in any case; an unknown one says so above the list", async () => {

@@ -1,0 +1,100 @@
+import { entryNamed } from "../../functions/catalogue";
+import type { Written } from "../workbook/workbook";
+import type { FileBook, FileCell, FileSheet } from "../workbook/xlsx-book";
+import { cellsIn, rangesText } from "./area";
+import type { Fill } from "./fill";
+import type { Finding } from "./finding";
+import { asValue } from "./keep";
+import type { Look } from "./look";
+import { findingText } from "./words";
+
+/** A sheet to be made for readers who don't have the add-in. */
+export interface CopiedSheet {
+  name: string;
+  cells: Written[][];
+}
+
+/** The sheets that call our functions, with values in place of all formulas, and one that lists the formulas and what holds of them. */
+export function readersCopy(look: Look): CopiedSheet[] {
+  const taken = new Set(look.book.sheets.map(({ name }) => name.toLowerCase()));
+  const sheets = look.book.sheets.filter(({ name }) => look.fills.some(({ sheet }) => sheet === name));
+  const copies = sheets.map((sheet) => ({
+    name: freeName(`${sheet.name} values`, taken),
+    cells: Array.from({ length: sheet.rows }, (_, row) =>
+      Array.from({ length: sheet.lengthOf(row) }, (_, column) => asValue(sheet.value(row, column))),
+    ),
+  }));
+  return [...copies, { name: freeName("Formulas and verdicts", taken), cells: listOf(look) }];
+}
+
+/** A name that no sheet has; hosts allow 31 characters. */
+function freeName(wanted: string, taken: Set<string>): string {
+  for (let nth = 1; ; nth++) {
+    const ending = nth === 1 ? "" : ` ${nth}`;
+    const name = wanted.slice(0, 31 - ending.length) + ending;
+    if (taken.has(name.toLowerCase())) continue;
+    taken.add(name.toLowerCase());
+    return name;
+  }
+}
+
+/** The same as a file: every sheet with its looks, values in place of formulas, and the list of formulas as a last sheet. */
+export function readersFile(book: FileBook, look: Look): FileBook {
+  const taken = new Set(book.sheets.map(({ name }) => name.toLowerCase()));
+  const list: FileSheet = {
+    name: freeName("Formulas and verdicts", taken),
+    cells: listOf(look).map((row) => row.map((cell) => ({ value: plain(cell) }))),
+    tables: [],
+    widths: { 0: 110, 1: 110, 2: 320, 3: 140, 4: 420, 5: 320 },
+    heights: {},
+    merged: [],
+  };
+  const sheets = book.sheets.map((sheet) => ({
+    ...sheet,
+    tables: sheet.tables.map((table) => ({ ...table, columns: table.columns.map(({ name }) => ({ name })) })),
+    cells: sheet.cells.map((row) => row?.map((cell) => cell && withoutFormula(cell))),
+  }));
+  return { ...book, sheets: [...sheets, list], names: [] };
+}
+
+function withoutFormula({ value, style }: FileCell): FileCell {
+  return { value: plain(asValue(value)), ...(style ? { style } : {}) };
+}
+
+function plain(cell: Written): FileCell["value"] {
+  return typeof cell === "object" && cell !== null ? cell.text : cell;
+}
+
+function listOf({ fills, findings }: Look): Written[][] {
+  const rows = fills.map((fill) => [
+    fill.sheet,
+    fill.range,
+    fill.text,
+    [...new Set(fill.calls)].join(", "),
+    verdictOf(fill, findings),
+    sourcesOf(fill),
+  ]);
+  const heading = ["Sheet", "Cells", "Formula of the first cell", "Functions", "What holds of it", "Sources"];
+  return [heading, ...rows].map((row) => row.map((text) => ({ text })));
+}
+
+/** How many rows hold, as VERDICT counts them, and what was found in the fill's cells. */
+function verdictOf(fill: Fill, findings: readonly Finding[]): string {
+  const { holds, marginal, fails } = fill.verdicts;
+  const counts = [
+    holds > 0 && `${holds} ${holds === 1 ? "holds" : "hold"}`,
+    marginal > 0 && `${marginal} marginal`,
+    fails > 0 && `${fails} ${fails === 1 ? "fails" : "fail"}`,
+  ].filter(Boolean);
+  const own = new Set(cellsIn(rangesText(fill.areas, Infinity)).map(({ row, column }) => `${row},${column}`));
+  const found = findings.filter(
+    ({ sheet, cells }) => sheet === fill.sheet && cellsIn(cells).some(({ row, column }) => own.has(`${row},${column}`)),
+  );
+  const limits = counts.length > 0 ? counts.join(", ") : "no limit was tested";
+  return [limits, ...found.map(findingText)].join("; ");
+}
+
+function sourcesOf({ calls }: Fill): string {
+  const texts = [...new Set(calls)].flatMap((name) => entryNamed(name)?.sources.map(({ text }) => text) ?? []);
+  return [...new Set(texts)].join("; ");
+}
