@@ -7,6 +7,8 @@ export default defineConfig({
         define: { WALLFALL_VERSION: JSON.stringify("test"), WALLFALL_BUILT: JSON.stringify("2026-01-01") },
         test: {
           name: "unit",
+          // No test asserts a time, and a busy machine is no failure.
+          testTimeout: 60_000,
           // Its ES module has no .mjs name, so Node.js alone would take it for CommonJS.
           server: { deps: { inline: ["unitmath"] } },
           include: ["test/**/*.test.ts"],
@@ -16,6 +18,7 @@ export default defineConfig({
       {
         test: {
           name: "libreoffice",
+          sequence: { groupOrder: 1 },
           server: { deps: { inline: ["unitmath"] } },
           include: ["test/twin/**/*.test.ts"],
           globalSetup: ["test/twin/setup.ts"],
@@ -25,6 +28,8 @@ export default defineConfig({
       {
         test: {
           name: "browser",
+          // Pages are driven when nothing else runs: two cores are few.
+          sequence: { groupOrder: 2 },
           include: ["test/browser/**/*.test.ts"],
           globalSetup: ["test/browser/setup.ts"],
           fileParallelism: false,
