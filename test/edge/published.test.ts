@@ -74,6 +74,17 @@ describe("against the catalogue's worked values", () => {
 });
 
 describe("limits and scalings", () => {
+  test("electrons of 1 eV move at 669 km/s on average (NRL: thermal speed 4.19×10⁷ √T cm/s times √(8/π), from memory)", () => {
+    expect(model.meanElectronSpeed(1) / 1e3).toBeCloseTo(669.3, 1);
+    expect(model.meanElectronSpeed(4) / model.meanElectronSpeed(1)).toBeCloseTo(2, 14);
+    expect((model.meanElectronSpeed(1) * 100) / (4.19e7 * Math.sqrt(8 / Math.PI))).toBeCloseTo(1, 2);
+  });
+
+  test("without a geometry the edge keeps exp(−1/2) of the body's density", () => {
+    expect(model.edgeRatio("free", 1, 1)).toBeCloseTo(0.60653066, 8);
+    expect(EDGERATIO()[0][0]).toBeCloseTo(0.60653066, 8);
+  });
+
   test("quadrupling the density halves the Debye length", () => {
     expect(model.debyeLength(4e16, 3)).toBeCloseTo(model.debyeLength(1e16, 3) / 2, 15);
   });
