@@ -4,7 +4,7 @@ import { SampleSheet } from "./sample-sheet";
 
 /** Readings of an invented chuck's bias against ground, in V. */
 const biases = Array.from({ length: 24 }, (_, i) => -75 - 25 * i);
-const first = 9;
+const first = 10;
 const last = first + biases.length - 1;
 
 export function chuckBias(): FileBook {
@@ -14,12 +14,13 @@ export function chuckBias(): FileBook {
 
 function studySheet(): SampleSheet {
   const sheet = new SampleSheet("Bias study");
-  sheet.widths = [88, 104, 88, 104, 96, 104, 240];
+  sheet.widths = [88, 112, 88, 104, 96, 104, 240];
   sheet.frozenRows = first - 1;
+  sheet.heights[7] = 56;
   sheet.type("A1", "Chuck bias study: how far the sheath reaches and how hard ions strike", "title");
   sheet.type(
     "A2",
-    "Invented readings. Change a tinted cell and all columns follow: one call in row 9 fills a column.",
+    "Invented readings. Change a tinted cell and all columns follow: one call in row 10 fills a column.",
     "note",
   );
   putSettings(sheet);
@@ -34,7 +35,7 @@ function studySheet(): SampleSheet {
   ];
   headings.forEach(([heading, unit], i) => {
     const column = "ABCDEFG"[i];
-    sheet.type(`${column}7`, heading, "heading").type(`${column}8`, unit, "unit");
+    sheet.type(`${column}8`, heading, "heading").type(`${column}9`, unit, "unit");
   });
   putColumns(sheet);
   return sheet;
@@ -46,6 +47,7 @@ function putSettings(sheet: SampleSheet): void {
     ["Density at the sheath edge, m⁻³", 2e16, "0.00E+00"],
     ["Electron temperature, eV", 3.2, "0.0"],
     ["Ion", "Ar+"],
+    ["Mean free path of ions, m", 0.06],
   ];
   settings.forEach(([label, value, format], i) =>
     sheet.type(`A${3 + i}`, label, "label").type(`D${3 + i}`, value, "typed", format),
@@ -54,9 +56,9 @@ function putSettings(sheet: SampleSheet): void {
 
 function putColumns(sheet: SampleSheet): void {
   biases.forEach((bias, i) => sheet.type(`A${first + i}`, bias));
-  const [plasma, n_edge, T_e, ion] = ["$D$3", "$D$4", "$D$5", "$D$6"].map((address) => sheet.at(address));
+  const [plasma, n_edge, T_e, ion, lambda_i] = [3, 4, 5, 6, 7].map((row) => sheet.at(`$D$${row}`));
   const [readings, walls] = ["A", "B"].map((letter) => sheet.at(`${letter}${first}:${letter}${last}`));
-  sheet.type("F3", "Debye length, mm", "label");
+  sheet.type("E3", "Debye length, mm", "label");
   sheet.call("G3", "DEBYELENGTH", [n_edge, T_e, undefined, "mm"], "calculated", "0.0000");
   sheet.call(`B${first}`, "WALLTOEDGE", [readings, plasma, T_e], "calculated", "0.0");
   sheet.call(`C${first}`, "SHEATHWIDTH", [walls, n_edge, T_e, "full", undefined, "mm"], "calculated", "0.000");
@@ -66,7 +68,7 @@ function putColumns(sheet: SampleSheet): void {
     sheet.native(`E${row}`, `=-B${row}/C${row}`, -wall / width, "calculated", "0.0");
   }
   sheet.call(`F${first}`, "IONIMPACTENERGY", [T_e, ion, undefined, walls], "calculated", "0.0");
-  sheet.call(`G${first}`, "LIMITCHECK", ["SHEATHWIDTH", walls, n_edge, T_e, "full"], "words");
+  sheet.call(`G${first}`, "LIMITCHECK", ["SHEATHWIDTH", walls, n_edge, T_e, "full", lambda_i], "words");
 }
 
 function summarySheet(study: SampleSheet): SampleSheet {

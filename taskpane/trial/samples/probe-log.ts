@@ -23,6 +23,7 @@ export function probeLog(): FileBook {
   const sheet = new SampleSheet("Log");
   sheet.widths = [70, 90, 100, 110, 120, 130, 110, 200];
   sheet.frozenRows = first - 1;
+  sheet.heights[first - 2] = 40;
   sheet.type("A1", "Probe log of 500 readings, as a table", "title");
   sheet.type(
     "A2",

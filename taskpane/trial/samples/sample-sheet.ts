@@ -21,7 +21,9 @@ export interface Cells {
 export class SampleSheet {
   readonly cells: FileSheet["cells"] = [];
   readonly tables: FileTable[] = [];
+  /** Pixels, by column and by row from 0. */
   widths: number[] = [];
+  readonly heights: Record<number, number> = {};
   frozenRows = 0;
 
   constructor(readonly name: string) {}
@@ -76,7 +78,7 @@ export class SampleSheet {
       cells: this.cells,
       tables: this.tables,
       widths: Object.fromEntries(this.widths.map((width, at) => [at, width])),
-      heights: {},
+      heights: this.heights,
       ...(this.frozenRows ? { frozen: { rows: this.frozenRows, columns: 0 } } : {}),
       merged: [],
     };

@@ -20,12 +20,13 @@ const total = last + 2;
 
 export function wallHeat(): FileBook {
   const sheet = new SampleSheet("Budget");
-  sheet.widths = [80, 84, 84, 56, 84, 72, 96, 84, 110, 96, 96, 96, 200];
+  sheet.widths = [80, 84, 92, 56, 92, 72, 96, 84, 110, 96, 96, 96, 200];
   sheet.frozenRows = first - 1;
+  sheet.heights[5] = 40;
   sheet.type("A1", "Wall heat-load budget: nine tiles, each with its check", "title");
   sheet.type("A2", "Invented tiles. Heat by ions and electrons alone: light from the plasma is not in it.", "note");
-  sheet.type("A3", "Relative standard uncertainty", "label");
-  [0.15, 0.1, undefined, 0.2].forEach((u, i) => u !== undefined && sheet.type(`${"BCDE"[i]}3`, u, "typed", "0%"));
+  sheet.type("A4", "Relative standard uncertainty of these columns", "label");
+  [0.15, 0.1, undefined, 0.2].forEach((u, i) => u !== undefined && sheet.type(`${"BCDE"[i]}5`, u, "typed", "0%"));
   sheet.type("H3", "Agreement asked for", "label").type("L3", 0.1, "typed", "0%");
   sheet.type("H4", "Power the cooling takes, kW", "label").type("L4", 900, "typed");
   const headings = [
@@ -72,14 +73,14 @@ function putTiles(sheet: SampleSheet): void {
   sheet.call(
     `K${first}`,
     "UNCERTAINTY",
-    ["WALLHEATFLUX", sheet.at(`B${first}:E${last}`), sheet.at("$B$3:$E$3"), undefined, undefined, "value"],
+    ["WALLHEATFLUX", sheet.at(`B${first}:E${last}`), sheet.at("$B$5:$E$5"), undefined, undefined, "value"],
     "calculated",
     "0.00E+00",
   );
   sheet.call(
     `L${first}`,
     "UNCERTAINTY",
-    ["WALLHEATFLUX", sheet.at(`B${first}:E${last}`), sheet.at("$B$3:$E$3"), undefined, undefined, "u"],
+    ["WALLHEATFLUX", sheet.at(`B${first}:E${last}`), sheet.at("$B$5:$E$5"), undefined, undefined, "u"],
     "calculated",
     "0.0E+00",
   );
