@@ -60,7 +60,13 @@ export function listed(values: readonly string[]): string {
 /** The list again; undefined where only its fingerprint was kept. */
 export function unlisted(list: string): string[] | undefined {
   if (/^\d+ cells: \w+$/.test(list)) return undefined;
-  return (list.match(/(?:^|; )(?:"(?:[^"\\]|\\.)*"|[^";]*)(?=; |$)/g) ?? []).map((each) => each.replace(/^; /, ""));
+  const found = [""];
+  // A semicolon inside quotes separates nothing.
+  for (const [part] of list.matchAll(/"(?:[^"\\]|\\.)*"|[^;"]+|;/g)) {
+    if (part === ";") found.push("");
+    else found[found.length - 1] += part;
+  }
+  return found.map((each, i) => (i === 0 ? each : each.slice(1)));
 }
 
 export interface SnapshotInput {
