@@ -23,7 +23,7 @@ const frontDoors = () =>
     .filter((file) => existsSync(file));
 
 const freeze = at("manifest/build/freeze-loader.js");
-const leaveOut = at("manifest/build/leave-out-loader.js");
+const forFunctions = ["leave-out-loader.js", "loop-loader.js"].map((name) => at(`manifest/build/${name}`));
 
 /** Shared by all bundles; each is a configuration of its own, so that none leaks into another. */
 const common = (origin) => ({
@@ -37,7 +37,7 @@ const common = (origin) => ({
     rules: [
       { test: /\.tsx?$/, loader: "esbuild-loader", options: { target: "es2022" } },
       // Modules whose exports are worked out by the build, see the loader.
-      { test: /atomic-weights\.ts$|equations\.ts$/, resourceQuery: { not: [/frozen/] }, loader: freeze },
+      { test: /[\\/](atomic-weights|equations)\.ts$/, resourceQuery: { not: [/frozen/] }, loader: freeze },
       { test: /\.css$/, use: [MiniCssExtractPlugin.loader, "css-loader"] },
       { test: /\.woff2$/, type: "asset/resource", generator: { filename: "fonts/[name][ext]" } },
     ],
@@ -87,7 +87,7 @@ export default (env = {}) => {
     new FunctionsJsonPlugin({ files: frontDoors, origin }),
     new SizePlugin({ asset: "functions.js", limit: 60 * 1024 }),
   );
-  functions.module.rules.push({ test: /entries\.ts$/, enforce: "pre", loader: leaveOut });
+  functions.module.rules.push({ test: /[\\/]functions[\\/].*\.ts$/, enforce: "pre", use: forFunctions });
   const bundles = [functions, styled("taskpane", "taskpane"), styled("trial", "taskpane/trial", noHyphenation)].filter(
     ({ entry }) => Object.values(entry).every((file) => existsSync(file)),
   );

@@ -3,6 +3,7 @@ import type { Fault } from "./fault";
 import type { CellError } from "./host";
 import type { Input } from "./inputs";
 import type { Quantity } from "./quantities";
+import type { Loop } from "./rows";
 import type { Twin } from "./twin";
 
 /** What a cell of a result may hold before it goes to the host. */
@@ -53,6 +54,8 @@ export interface Facts<I extends readonly Input<any>[]> {
   result: Quantity | Table;
   /** Numbers in the inputs' own units in, the result's own unit out; a Fault where the model has no solution. */
   compute: (...values: ValuesOf<I>) => number | string | (Value | CellError)[][] | Fault;
+  /** Put in by the build, for speed alone. */
+  loop?: Loop;
   /** The equation for display, TeX. */
   equation: string;
   /** The function as plain spreadsheet arithmetic, or why there is none. */

@@ -97,7 +97,7 @@ function evaluateRows(entry: Entry<any>, args: readonly unknown[], result: Quant
   const { shape, columns, odd } = reading;
   const size = shape.rows * shape.columns;
   const values = columns.slice(0, entry.inputs.length).map((column) => column.values);
-  const { numbers, others } = applyRows(entry.compute, values, size, odd);
+  const { numbers, others } = applyRows(entry, values, size, odd);
   if (entry.takesUnit) convert(numbers, columns[columns.length - 1].values);
   const special = (index: number): Value | CellError => {
     if (odd?.[index]) return oddResult(inputs, reading, index);
@@ -181,7 +181,7 @@ function evaluateTable(entry: Entry<any>, args: readonly unknown[]): Result {
   const size = shape.rows * shape.columns;
   if (shape.columns > 1) return [[toCellError(tableOverRow(entry, shape))]];
   const { others } = applyRows(
-    entry.compute,
+    entry,
     columns.map((column) => column.values),
     size,
     odd,

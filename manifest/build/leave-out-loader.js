@@ -1,25 +1,34 @@
 import ts from "typescript";
 
-/** Facts of an entry that only readers see, in the pane: no function needs them to compute. */
-export const shownOnly = ["equation", "twin", "accuracy", "changes"];
+/** What only readers see, in the pane: facts of an entry, and the source of each of its limits. */
+export const shownOnly = ["equation", "twin", "accuracy", "changes", "sources", "example"];
 
 /**
- * Takes them out of the entries that go into functions.js, which every workbook with a SHEATH formula loads: together
- * they weigh more than the physics of a family.
+ * Takes it out of functions.js, which every workbook with a SHEATH formula loads: no function needs it to compute, and
+ * together it weighs more than the physics of a family.
  */
 export default function leaveOut(code) {
-  const source = ts.createSourceFile(this.resourcePath, code, ts.ScriptTarget.Latest, true);
   const cuts = [];
   const visit = (node) => {
-    const isEntry = ts.isCallExpression(node) && ts.isIdentifier(node.expression) && node.expression.text === "entry";
-    const facts = isEntry ? node.arguments.find(ts.isObjectLiteralExpression) : undefined;
-    for (const fact of facts?.properties ?? []) {
-      if (!fact.name || !shownOnly.includes(fact.name.getText())) continue;
-      const comma = code[fact.getEnd()] === "," ? 1 : 0;
-      cuts.push([fact.getFullStart(), fact.getEnd() + comma]);
-    }
-    ts.forEachChild(node, visit);
+    if (ts.isPropertyAssignment(node) && isShownOnly(node)) {
+      cuts.push([node.pos, node.end + (code[node.end] === "," ? 1 : 0)]);
+    } else ts.forEachChild(node, visit);
   };
-  visit(source);
+  visit(ts.createSourceFile(this.resourcePath, code, ts.ScriptTarget.Latest, true));
   return cuts.reduceRight((rest, [from, to]) => rest.slice(0, from) + rest.slice(to), code);
+}
+
+function isShownOnly(property) {
+  const name = property.name.getText();
+  return (isFactOfEntry(property) && shownOnly.includes(name)) || (name === "source" && isNamedSource(property));
+}
+
+function isFactOfEntry({ parent }) {
+  const call = parent.parent;
+  return ts.isCallExpression(call) && call.expression.getText() === "entry";
+}
+
+/** "source: R91", by the name that functions/sources.ts gives it. */
+function isNamedSource({ initializer }) {
+  return ts.isIdentifier(initializer) && /^[A-Z]+\d*[A-Z]*$/.test(initializer.text);
 }
