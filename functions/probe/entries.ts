@@ -5,6 +5,7 @@ import { format } from "../cells/format";
 import { ionInput, optional, quantityInput, wordInput } from "../cells/inputs";
 import { quantities } from "../cells/quantities";
 import { seriesInput } from "../cells/series";
+import { coldBohmSpeed } from "../edge/twins";
 import { C03, LL, MSL26 } from "../sources";
 import { maxwellianTail, weakIonEmission } from "../wall/limits";
 import { fitSweeps } from "./fitted-sweeps";
@@ -36,6 +37,11 @@ export const PROBEDENSITY = entry("PROBEDENSITY", {
   compute: (I_sat, area, T_e, ion, edge_ratio, gamma_ion) =>
     model.probeDensity(I_sat, area, T_e, ion, edge_ratio, gamma_ion ?? 0),
   equation: String.raw`n = \frac{|I_\mathrm{sat}|}{\dfrac{n_\mathrm{edge}}{n_\mathrm{bulk}}\, e A\, u_B (1 + \gamma)}`,
+  twin: {
+    blanks: { gamma_ion: 0 },
+    steps: [coldBohmSpeed],
+    formula: "ABS(I_sat)/(edge_ratio*e*area*u_B*(1+gamma_ion))",
+  },
   limits: [
     thinSheath((I_sat, area, T_e, ion, edge_ratio, gamma_ion, radius) => [
       model.probeDensity(I_sat, area, T_e, ion, edge_ratio, gamma_ion ?? 0),
@@ -81,6 +87,10 @@ export const PROBETEMPERATURE = entry("PROBETEMPERATURE", {
     }),
   ],
   equation: String.raw`T_e = \frac{V_p - V_f}{\ln\sqrt{\dfrac{M}{2\pi m Z}} - \ln\dfrac{n_\mathrm{edge}}{n_\mathrm{bulk}}}`,
+  twin: {
+    steps: [{ name: "depth", unit: "", formula: 'LN(SQRT(M/(2*PI()*m_e*Z)))-IF(from="edge",0,LN(edge_ratio))' }],
+    formula: "IF(V_p>V_f,IF(depth>0,(V_p-V_f)/depth,NA()),NA())",
+  },
   sources: [LL, C03],
   changes: first,
   example: [25, 9.5, "Ar+"],
@@ -92,6 +102,7 @@ export const ORBITALCURRENT = entry("ORBITALCURRENT", {
   result: quantities.current,
   compute: model.orbitalCurrent,
   equation: String.raw`I = 2\pi r l\, n e\, \frac{\sqrt{2}}{\pi} \sqrt{\frac{Z e V}{M}}`,
+  twin: { formula: "2*PI()*radius*length*n_bulk*e*SQRT(2)/PI()*SQRT(Z*e*ABS(V)/M)" },
   limits: [
     thinWire((V, n_bulk, radius) => [V, n_bulk, radius]),
     longWire((_V, _n, radius, length) => [radius, length]),
@@ -107,6 +118,7 @@ export const ORBITALDENSITY = entry("ORBITALDENSITY", {
   result: quantities.density,
   compute: model.orbitalDensity,
   equation: String.raw`n = \frac{|I|}{2\pi r l\, e}\, \frac{\pi}{\sqrt{2}} \sqrt{\frac{M}{Z e V}}`,
+  twin: { formula: "ABS(I)/(2*PI()*radius*length*e*SQRT(2)/PI()*SQRT(Z*e*ABS(V)/M))" },
   limits: [
     thinWire((I, V, radius, length, ion) => [V, model.orbitalDensity(I, V, radius, length, ion), radius]),
     longWire((_I, _V, radius, length) => [radius, length]),
@@ -136,6 +148,7 @@ export const PROBEFIT = entry("PROBEFIT", {
     return rows.map((row) => (part === undefined ? probeParts.map((name) => row[name]) : [pick(row, part, area, ion)]));
   },
   equation: String.raw`I(V) = I_\mathrm{sat} \left( e^{(V - V_f)/T_e} - 1 \right) + g\,(V - V_f)`,
+  twin: "it fits a whole swept characteristic",
   limits: [noRfPickup, ionsSaturate, longRetarding, temperatureCertain],
   sources: [LL, C03],
   changes: first,

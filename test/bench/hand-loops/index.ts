@@ -6,8 +6,9 @@ import { edge } from "./edge";
 import { layer } from "./layer";
 import { magnetised } from "./magnetised";
 import { negativeIons } from "./negative-ions";
+import { probe } from "./probe";
 import { rf } from "./rf";
 import { wall } from "./wall";
 
 /** By function, of one column for each number of its entry's example, in order. */
-export const handLoops = { ...edge, ...wall, ...layer, ...rf, ...negativeIons, ...magnetised };
+export const handLoops = { ...edge, ...wall, ...layer, ...rf, ...negativeIons, ...magnetised, ...probe };
