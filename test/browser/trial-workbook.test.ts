@@ -2,23 +2,27 @@ import { describe, expect, test } from "vitest";
 import { cell, enter, expectStatus, openTrial, readSheet, select, selected } from "./trial-sheet";
 
 describe("the pane's way to the cells", () => {
-  test("writes text as text, formulas as formulas, and leaves a cell alone where nothing is given", async () => {
+  test("writes text as text, formulas as formulas, clears for an empty text, and leaves a cell alone where nothing is given", async () => {
     const page = await openTrial();
     await enter(page, "O9", "stays");
+    await enter(page, "O10", "goes");
     await page.evaluate(() =>
       window.wallfallWorkbook.write({ sheet: "Pre-clean", address: "N8" }, [
         ["1/2", 1.5],
         [true, null],
         ["=SHEATH.EDGERATIO()", ""],
+        [{ text: "=1+1" }, { text: "+2" }],
       ]),
     );
     const { values, formulas } = await readSheet(page);
-    expect(values.slice(7, 10).map((row) => row.slice(13, 15))).toEqual([
+    expect(values.slice(7, 11).map((row) => row.slice(13, 15))).toEqual([
       ["1/2", 1.5],
       [true, "stays"],
-      [Math.exp(-0.5), ""],
+      [Math.exp(-0.5), null],
+      ["=1+1", "+2"],
     ]);
     expect(formulas[9][13]).toBe("=SHEATH.EDGERATIO()");
+    expect(formulas[10][13]).toBeUndefined();
   });
 
   test("writes over a formula, and over one that fills cells below", async () => {
