@@ -29,7 +29,7 @@ export interface Wanted {
 }
 
 /** Width of a character of the labels, as the style sheet sets them, and the height of a line of them. */
-export const characterWidth = 6.7;
+export const characterWidth = 7.6;
 const lineHeight = 18;
 
 /** A logarithmic axis, where the values ask for one: all above zero, and each trace over two decades at least. */

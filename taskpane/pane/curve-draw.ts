@@ -92,7 +92,7 @@ function title(traces: readonly Trace[], unit: string, left: number, y: number):
     const from = at;
     at += 30 + (text.length + 2) * characterWidth;
     return [
-      svg("path", { class: `trace trace-${i}`, d: `M${from} ${y - 4}h24` }),
+      svg("path", { class: `key trace trace-${i}`, d: `M${from} ${y - 4}h24` }),
       svg("text", { class: "name", x: from + 30, y }, text),
     ];
   });

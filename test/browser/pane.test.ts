@@ -1,7 +1,7 @@
-import axe from "axe-core";
 import type { Page } from "playwright-core";
 import { describe, expect, inject, test } from "vitest";
 import { catalogue } from "../../functions/catalogue";
+import { violations } from "./accessibility";
 import { openPage } from "./chromium";
 
 const names = catalogue.map(({ name }) => name);
@@ -11,16 +11,6 @@ async function go(page: Page, address: string): Promise<void> {
   await page.evaluate((hash) => (location.hash = hash), address);
   const shown = address === "" ? ".functions" : `.page[data-function="${address}"]`;
   await page.locator(shown).first().waitFor();
-}
-
-async function violations(page: Page): Promise<string[]> {
-  await page.evaluate(`window.axe ?? (() => { ${axe.source} })()`);
-  return page.evaluate(async () => {
-    const found = await (window as unknown as { axe: typeof axe }).axe.run(document, { resultTypes: ["violations"] });
-    return found.violations.flatMap(({ id, nodes }) =>
-      nodes.map(({ target, failureSummary }) => `${id} ${target}: ${failureSummary}`),
-    );
-  });
 }
 
 describe.each(["light", "dark"] as const)("in %s", (colorScheme) => {
@@ -64,11 +54,11 @@ test("equations are set in the font that comes with the build", async () => {
   expect(loaded).toEqual(["STIX Two Math"]);
 });
 
-test("Tab goes through a page in reading order: back, inputs, unit, button, equation", async () => {
+test("Tab goes through a page in reading order: back, inputs, unit, button, sweep, equation", async () => {
   const page = await openPage("taskpane.html#DEBYELENGTH");
   await page.locator(".page").waitFor();
   const stops: string[] = [];
-  for (let i = 0; i < 7; i++) {
+  for (let i = 0; i < 8; i++) {
     await page.keyboard.press("Tab");
     stops.push(
       await page.evaluate(
@@ -83,6 +73,7 @@ test("Tab goes through a page in reading order: back, inputs, unit, button, equa
     "wallfall-input-T_i",
     "wallfall-unit",
     "Copy formula",
+    "Sweep an input",
     "equation",
   ]);
 });

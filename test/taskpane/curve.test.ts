@@ -105,7 +105,7 @@ test("labels of an axis keep apart, whatever its range and width", () => {
         const shown = ticks.filter(({ label }) => label !== "").sort((a, b) => a.at - b.at);
         expect(shown.length, `${low} to ${high}`).toBeGreaterThan(0);
         shown.slice(1).forEach(({ at, label }, i) => {
-          expect(at - shown[i].at).toBeGreaterThan(((label.length + shown[i].label.length) / 2) * 6.7);
+          expect(at - shown[i].at).toBeGreaterThan(((label.length + shown[i].label.length) / 2) * 7.6);
         });
       }
     }
