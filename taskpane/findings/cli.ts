@@ -7,9 +7,13 @@ import { basename, resolve } from "node:path";
 import { fileWorkbook } from "../workbook/file";
 import { FileProblem } from "../workbook/xlsx-book";
 import { mostPacked, tooLarge } from "../workbook/xlsx-unpack";
-import { openOf, readAccepted } from "./accepted";
-import { look } from "./look";
+import { lookThrough, openFindings } from "./look-through";
 import { textReport } from "./text-report";
+
+/** The build puts the version into what it makes; here it stands in the package. */
+const { version } = JSON.parse(readFileSync(new URL("../../package.json", import.meta.url), "utf8")) as {
+  version: string;
+};
 
 const files = process.argv.slice(2).filter((argument) => !argument.startsWith("-"));
 
@@ -22,10 +26,9 @@ for (const file of files) process.exitCode = Math.max(Number(process.exitCode ??
 async function findingsOf(file: string): Promise<0 | 1 | 2> {
   try {
     const workbook = fileWorkbook(bytesOf(file));
-    const found = await look(await workbook.read(), { progress: showProgress });
-    const accepted = await readAccepted(workbook);
-    console.log(textReport(basename(file), found, accepted));
-    return openOf(found.findings, accepted).length > 0 ? 1 : 0;
+    const found = await lookThrough(workbook, version, showProgress);
+    console.log(textReport(basename(file), found));
+    return openFindings(found).length > 0 ? 1 : 0;
   } catch (error) {
     console.error(`${file} cannot be looked through. ${whyNot(error)}`);
     return 2;

@@ -1,34 +1,36 @@
-import { openOf, standingOf, type Accepted } from "./accepted";
+import { standingOf } from "./accepted";
 import { causes, type Cause } from "./causes";
 import type { Finding } from "./finding";
-import type { Look } from "./look";
+import { openFindings, type LookedThrough } from "./look-through";
 import { counted, countText, findingText, lookText, placeText } from "./words";
 
 /** The findings as a table for a terminal. */
-export function textReport(name: string, look: Look, accepted: Accepted): string {
-  const open = openOf(look.findings, accepted);
+export function textReport(name: string, found: LookedThrough): string {
+  const { look, accepted, report, changes } = found;
+  const open = openFindings(found);
   const set = look.findings.filter((finding) => standingOf(finding, accepted) === "accepted");
   return [
     `${name}: ${lookText(look)}`,
     open.length === 0 ? "No findings." : `${counted(open.length, "finding")}.`,
     ...byCause(open),
-    ...(set.length === 0
-      ? []
-      : ["", `Accepted: ${set.length}`, ...table(set.map((each) => [...row(each), accepted[each.key].reason]))]),
-    ...(look.notFollowed.length === 0
-      ? []
-      : [
-          "",
-          "Not followed, so neither computed again nor judged",
-          ...table(
-            look.notFollowed.map(({ sheet, cells, count, why }) => [
-              `${sheet}!${placeText({ cells })}`,
-              String(count),
-              why,
-            ]),
-          ),
-        ]),
+    ...part(
+      `Accepted: ${set.length}`,
+      set.map((finding) => [...row(finding), accepted[finding.key].reason]),
+    ),
+    ...part(
+      "Not followed, so neither computed again nor judged",
+      look.notFollowed.map(({ sheet, cells, count, why }) => [`${sheet}!${placeText({ cells })}`, String(count), why]),
+    ),
+    ...part(
+      "Changed since the report in the workbook",
+      changes.map(({ sheet, cells, what, why }) => [`${sheet}!${placeText({ cells })}`, what, why.join("; ")]),
+    ),
+    ...(report && report.snapshot.length > 0 && changes.length === 0 ? ["Nothing has changed since its report."] : []),
   ].join("\n");
+}
+
+function part(title: string, rows: string[][]): string[] {
+  return rows.length === 0 ? [] : ["", title, ...table(rows)];
 }
 
 function byCause(findings: readonly Finding[]): string[] {

@@ -1,10 +1,11 @@
 import { standingOf } from "../findings/accepted";
 import { causes, type Cause } from "../findings/causes";
 import type { Finding } from "../findings/finding";
+import { openFindings } from "../findings/look-through";
 import { counted, countText } from "../findings/words";
 import type { Acceptance } from "../findings/accepted";
 import { acceptView } from "./findings-accept";
-import { openFindings, type Found } from "./findings-found";
+import type { Found } from "./findings-found";
 import { causeMark } from "./findings-mark";
 import { placesView } from "./findings-places";
 import { h, type Child } from "./h";

@@ -1,12 +1,13 @@
 import "./findings-look.css";
 import { version } from "../../functions/version";
 import { accept as acceptFinding, readAccepted } from "../findings/accepted";
+import { lookThrough, openFindings } from "../findings/look-through";
 import { Cancelled } from "../findings/pace";
 import { counted, lookText } from "../findings/words";
 import type { Workbook } from "../workbook/workbook";
 import { actionsView } from "./findings-actions";
 import { acceptFiles, fileChooser, openFile } from "./findings-file";
-import { lookThrough, openFindings, type Found, type Source } from "./findings-found";
+import type { Found, Source } from "./findings-found";
 import { findingsList, overview, type Accept } from "./findings-list";
 import { moreOf } from "./findings-more";
 import { h } from "./h";
@@ -89,7 +90,8 @@ class FindingsView {
     cancel.focus();
     try {
       const source = await open();
-      this.showFound(await lookThrough(source, version, (done) => (progress.value = done), stop.signal));
+      const found = await lookThrough(source.workbook, version, (done) => (progress.value = done), stop.signal);
+      this.showFound({ ...source, ...found });
     } catch (error) {
       if (this.looking === stop)
         this.showStart(error instanceof Cancelled || stop.signal.aborted ? undefined : problem(error));

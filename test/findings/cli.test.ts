@@ -3,7 +3,10 @@ import { mkdtempSync, readFileSync, rmSync, statSync, truncateSync, writeFileSyn
 import { tmpdir } from "node:os";
 import { join } from "node:path";
 import { afterAll, expect, test } from "vitest";
+import { lookThrough } from "../../taskpane/findings/look-through";
+import { reportCells, reportSheet } from "../../taskpane/findings/report";
 import { cleanBooks } from "./clean-books";
+import { memoryWorkbook } from "./memory-workbook";
 import { saveWorkbook, withParts } from "./save-workbook";
 
 const folder = mkdtempSync(join(tmpdir(), "wallfall-"));
@@ -51,6 +54,20 @@ test("a book with findings ends with 1 and prints them by cause, each with its p
   );
   expect(said).toMatch(/^Blank cells where zero is a value: 1\n {2}Cathode!B20 /m);
   expect({ code, untouched }).toEqual({ code: 1, untouched: true });
+});
+
+test("what changed since the report in the book is said with its reason", slow, async () => {
+  const book = cathode();
+  const { workbook, content } = memoryWorkbook(book.build());
+  const found = await lookThrough(workbook, "1.0.0", () => undefined);
+  const facts = { ...found, before: undefined, version: "1.0.0", date: "2026-05-04" };
+  await workbook.replaceSheet(reportSheet, reportCells(facts));
+  content.sheets[0] = book.on("Cathode").type("E12", 2500).build().sheets[0];
+  const { said, code } = await findings(saveWorkbook(content));
+  expect(said).toMatch(
+    /Changed since the report in the workbook\n {2}Cathode!H12 +H12 was \S+, is \S+ +input T_wall: E12 was 2270, is 2500\n$/,
+  );
+  expect(code).toBe(0);
 });
 
 test(

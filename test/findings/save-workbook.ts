@@ -31,7 +31,7 @@ function workSheet({ name, origin, values, formulas, spills }: SheetContent): Wo
     row.forEach((value, j) => {
       const place = { row: from.row + i, column: from.column + j };
       const address = a1(place);
-      const formula = formulas[i][j];
+      const formula = formulas[i]?.[j];
       if (value === null && formula === undefined) return;
       const cell = cellObject(value);
       if (formula !== undefined) cell.f = storedFormula(formula);
@@ -40,7 +40,10 @@ function workSheet({ name, origin, values, formulas, spills }: SheetContent): Wo
       sheet[address] = cell;
     }),
   );
-  const last = { row: from.row + values.length - 1, column: from.column + values[0].length - 1 };
+  const last = {
+    row: from.row + values.length - 1,
+    column: from.column + Math.max(...values.map((row) => row.length)) - 1,
+  };
   sheet["!ref"] = `${origin}:${a1(last)}`;
   return sheet;
 }
