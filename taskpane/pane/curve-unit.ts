@@ -27,9 +27,7 @@ export function scaledUnit(unit: string, size: number): ScaledUnit {
 /** A value with its unit as it stands in a sentence. */
 export function quantity(value: number, unit: string): string {
   const { factor, text, named } = scaledUnit(unit, Math.abs(value));
-  return named
-    ? `${numberText(value / factor, 4)} ${text}`.trimEnd()
-    : `${numberText(value, 4)} ${prettyUnit(unit)}`.trimEnd();
+  return named ? spaced(numberText(value / factor, 4), text) : spaced(numberText(value, 4), prettyUnit(unit));
 }
 
 /** "−300 to −0.339 V": both ends in the unit that suits the larger, where it suits the smaller, too. */
@@ -37,7 +35,12 @@ export function span(first: number, last: number, unit: string): string {
   const { factor, text, named } = scaledUnit(unit, Math.max(Math.abs(first), Math.abs(last)));
   const isFar = first !== 0 && last !== 0 && Math.abs(Math.log10(Math.abs(last / first))) > 4;
   const [by, name] = named && !isFar ? [factor, text] : [1, prettyUnit(unit)];
-  return `${numberText(first / by, 4)} to ${numberText(last / by, 4)} ${name}`.trimEnd();
+  return spaced(`${numberText(first / by, 4)} to ${numberText(last / by, 4)}`, name);
+}
+
+/** Of all units the degree alone follows its number without a space (SI Brochure, 5.4.3). */
+function spaced(number: string, unit: string): string {
+  return unit === "" || unit === "°" ? number + unit : `${number} ${unit}`;
 }
 
 export function powerOfTen(power: number): string {

@@ -62,6 +62,7 @@ test("both ends of a range stand in one unit, unless they are many decades apart
   expect(span(0.000574, 0.01815, "m")).toBe("0.574 to 18.15 mm");
   expect(span(1.444e-60, 2.221e8, "A/m^2")).toBe("1.444 × 10⁻⁶⁰ to 2.221 × 10⁸ A/m²");
   expect(quantity(1e16, "m^-3")).toBe("10¹⁶ m⁻³");
+  expect(quantity(30, "deg")).toBe("30°");
 });
 
 const curve = (x: number[], y: number[]): Curve => ({
