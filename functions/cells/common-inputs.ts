@@ -7,12 +7,15 @@ export const n_bulk = quantityInput("n_bulk", quantities.density);
 export const n_edge = quantityInput("n_edge", quantities.density);
 export const T_e = quantityInput("T_e", quantities.temperature);
 
-/** Blank stays undefined, so that a limit can say that the ion temperature was not given; the models then take 0. */
+/**
+ * Blank stays undefined, so that a limit can say that the ion temperature was not given; the models then take 0. Room
+ * temperature in kelvin, 293, is the usual slip; ions at a wall are rarely so hot in eV.
+ */
 export const T_i = optional(
   quantityInput("T_i", quantities.temperature, {
     least: 0,
     zeroIsValue: true,
-    band: { low: 0, high: 1000, above: "K meant?" },
+    band: { low: 0, high: 290, above: "K meant?" },
   }),
 );
 

@@ -36,7 +36,7 @@ const REGIME = entry("REGIME", {
     ionInput(),
     optional(quantityInput("p", quantities.pressure)),
     optional(
-      quantityInput("T_i", quantities.temperature, { least: 0, band: { low: 0, high: 1000, above: "K meant?" } }),
+      quantityInput("T_i", quantities.temperature, { least: 0, band: { low: 0, high: 290, above: "K meant?" } }),
     ),
     optional(quantityOrWord("V_s", quantities.drop, ["floating"], given)),
     optional(quantityInput("size", quantities.length)),

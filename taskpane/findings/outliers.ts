@@ -20,24 +20,40 @@ export function noteOutliers(book: Book, fill: Fill, tally: Tally): void {
     for (const line of linesOf(areas.list)) {
       const sheet = book.sheet(line.sheet)!;
       const sizes = Array.from({ length: line.length }, (_, i) => sizeAt(sheet, line, i));
-      sizes.forEach((size, i) => {
+      const alone = sizes.flatMap((size, i) => {
         const expected = expectedAt(sizes, i);
-        if (expected === undefined || Math.max(size / expected, expected / size) < jump) return;
-        const { row, column } = cellOf(line, i);
-        if (tally.has("doubtful", line.sheet, pack(row, column))) return;
-        const what = `${name} stands alone against the cells around it; another unit meant?`;
-        tally
-          .draft(`outlier|${line.sheet}|${line.across ? row : column}`, () => ({
-            cause: "doubtful",
-            sheet: line.sheet,
-            what,
-            subject: "outlier",
-          }))
-          .by([fill.calls[call]])
-          .add(pack(row, column), () => `${format(size)} among ${format(expected)}`);
+        return expected !== undefined && Math.max(size / expected, expected / size) >= jump
+          ? [{ i, size, expected }]
+          : [];
       });
+      // Where many stand alone, the column is meant to go up and down.
+      if (alone.length > Math.max(2, line.length / 10)) continue;
+      for (const each of alone) note(each, line, name, fill.calls[call], tally);
     }
   }
+}
+
+function note(
+  { i, size, expected }: { i: number; size: number; expected: number },
+  line: Line,
+  name: string,
+  call: string,
+  tally: Tally,
+): void {
+  const { sheet } = line;
+  const { row, column } = cellOf(line, i);
+  const cell = pack(row, column);
+  if (tally.has("doubtful", sheet, cell)) return;
+  const what = `${name} stands alone against the cells around it; another unit meant?`;
+  tally
+    .draft(`outlier|${sheet}|${line.across ? row : column}`, () => ({
+      cause: "doubtful",
+      sheet,
+      what,
+      subject: "outlier",
+    }))
+    .by([call])
+    .add(cell, () => `${format(size)} among ${format(expected)}`);
 }
 
 /** The size of a number that was typed; NaN for anything else, and for 0, which no factor can judge. */

@@ -3,6 +3,7 @@ import type { Entry } from "../../functions/cells/entry";
 import { isCellError } from "../../functions/cells/host";
 import type { Input } from "../../functions/cells/inputs";
 import { catalogue, checks } from "../../functions/catalogue";
+import { nearest } from "../../functions/checks/nearest";
 import { frontDoors } from "../../functions/front-doors";
 import { pack, type Area, type Packed } from "./area";
 import type { Book, Sheet } from "./book";
@@ -108,13 +109,13 @@ export class Recalculation {
   }
 
   private noteNewer({ name, id }: Call, filled: Area, fill: Fill, takes: number | undefined): void {
-    const what =
-      takes === undefined
-        ? `there is no function ${name} in this version`
-        : `${name} takes ${takes} arguments in this version`;
     const { sheet } = fill;
+    const what = () =>
+      takes === undefined
+        ? `there is no function ${name} in this version; the nearest are ${nearest(name, [...entries.keys()]).join(", ")}`
+        : `${name} takes ${takes} arguments in this version`;
     this.tally
-      .draft(`newer|${fill.id}|${id}`, () => ({ cause: "newer", sheet, what, subject: name }))
+      .draft(`newer|${fill.id}|${id}`, () => ({ cause: "newer", sheet, what: what(), subject: name }))
       .in(fill, [name], () => fill.cells.length)
       .add(pack(filled.row, filled.column));
   }

@@ -20,12 +20,17 @@ export function snapshotOf(book: Book, fills: readonly Fill[], version: string):
   return fills.map((fill) => ({
     sheet: fill.sheet,
     cells: rangesText(fill.areas, Infinity),
-    formula: fill.text,
+    formula: formulaAt(book, fill) ?? fill.text,
     functions: [...new Set(fill.calls)].join(", "),
     inputs: [...fill.inputs.values()].flatMap(({ name, areas }) => inputLines(book, name, areas.list)).join("\n"),
     values: listed(valuesIn(book, fill.sheet, rangesText(fill.areas, Infinity))),
     version,
   }));
+}
+
+/** The formula of the first cell that is told, from which the others' follow. */
+function formulaAt(book: Book, { sheet, areas }: Fill): string | undefined {
+  return book.sheet(sheet)?.formula(areas[0].row, areas[0].column);
 }
 
 function inputLines(book: Book, name: string, areas: readonly Area[]): string[] {

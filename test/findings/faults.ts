@@ -150,6 +150,7 @@ export const faults: readonly Plant[] = [
     ],
     times(11604.5),
   ),
+  typedFault("ions at room temperature in kelvin", ["doubtful"], [[tile, "D"]], (_, pick) => 293 + pick(60)),
   typedFault("field typed in gauss", ["doubtful"], [[tile, "J"]], times(1e4)),
   typedFault(
     "unit of another quantity",

@@ -115,6 +115,26 @@ describe("a long workbook", () => {
   });
 });
 
+test("a sweep over many decades, up and down or step by step, is not doubted; one slip in it is", async () => {
+  const sweep = (densities: number[]) => {
+    const model = new SheetModel().on("Data");
+    densities.forEach((n, i) =>
+      model
+        .type(`A${i + 1}`, n)
+        .formula(`B${i + 1}`, `=SHEATH.DEBYELENGTH(A${i + 1},3)`, (at) => one("DEBYELENGTH", at(`A${i + 1}`), 3)),
+    );
+    return causesIn(model.build());
+  };
+  const steps = Array.from({ length: 12 }, (_, i) => 1e14 * 10 ** (i / 2));
+  expect(await sweep(steps)).toEqual([]);
+  expect(await sweep([...steps, ...steps])).toEqual([]);
+  expect(await sweep(steps.flatMap((n) => [n, 1e19 / (n / 1e14)]))).toEqual([]);
+  const level = Array.from({ length: 12 }, (_, i) => 2e19 + i * 1e18);
+  expect(await sweep(level)).toEqual([]);
+  expect(await sweep(level.map((n, i) => (i === 5 ? n / 1e6 : n)))).toEqual(["doubtful"]);
+  expect(await sweep(level.map((n, i) => (i === 0 ? n / 1e6 : n)))).toEqual(["doubtful"]);
+});
+
 test("text that a workbook holds stays text: a formula in a string is not a call", async () => {
   const model = new SheetModel()
     .on("Data")
