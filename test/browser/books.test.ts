@@ -26,7 +26,7 @@ test("the chuck and the oxygen–argon source compute without an error anywhere"
 
 test("the chuck's readings become drops against the edge: plasma potential and half an electron temperature between", async () => {
   const sheet = await readSheet(await openTrial(), "Chuck");
-  const [readings, walls] = [numbers(column(sheet, "Chuck reading")), numbers(column(sheet, "Wall to edge"))];
+  const [readings, walls] = [numbers(column(sheet, "Chuck to ground")), numbers(column(sheet, "Wall to edge"))];
   expect(readings).toHaveLength(41);
   expect([readings[0], readings.at(-1)]).toEqual([-20, -2000]);
   // WALLTOEDGE with the free edge ratio exp(−1/2), at 18 V and 3.2 eV.

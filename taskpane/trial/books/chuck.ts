@@ -94,7 +94,7 @@ export const chuck: OpeningSheet = {
     { key: "step", heading: "Step", width: 44, typed: readings.map((_, i) => i + 1) },
     {
       key: "V_wall",
-      heading: "Chuck reading",
+      heading: "Chuck to ground",
       unit: "V",
       width: 92,
       format: "0.0",
