@@ -48,8 +48,15 @@ export function readInputs(inputs: readonly Input<any>[], args: readonly unknown
 }
 
 function raggedRange(inputs: readonly Input<any>[], cells: Cells[]): Fault | undefined {
-  const at = cells.findIndex((rows) => rows.some((row) => row.length !== rows[0].length) || rows[0].length === 0);
+  const at = cells.findIndex(isRagged);
   return at < 0 ? undefined : new Fault("#VALUE!", `${inputs[at].name}: the range is not a rectangle; select one.`);
+}
+
+/** A plain loop: on long columns a callback for each row costs more than the physics. */
+function isRagged(rows: Cells): boolean {
+  const width = rows[0].length;
+  for (let i = 0; i < rows.length; i++) if (rows[i].length !== width) return true;
+  return width === 0;
 }
 
 function oddRows(columns: readonly Column[], size: number): Uint8Array | undefined {
