@@ -1,6 +1,6 @@
 import { entryNamed } from "../../functions/catalogue";
 import { CODATA } from "../../functions/sources";
-import type { CellContent, SheetContent, WorkbookContent, Written } from "../workbook/workbook";
+import type { CellContent, SheetContent, SheetLook, WorkbookContent, Written } from "../workbook/workbook";
 import { standingOf, type Accepted } from "./accepted";
 import { causes } from "./causes";
 import type { Change } from "./changes";
@@ -12,27 +12,30 @@ import { counted, fromText, lookText, placeText } from "./words";
 /** The sheet that the report is written to. */
 export const reportSheet = "Sheath findings";
 
+/** Columns of sentences come fourth and fifth in every part, so that one width of each column suits all. */
 const headings = {
   findings: [
     "Cause",
     "Sheet",
     "Cells",
-    "Found",
-    "Of",
-    "Functions",
     "Finding",
     "How far, worst first",
+    "Functions",
+    "Found",
+    "Of",
     "Standing",
     "Reason",
     "Your notes",
     "Key",
   ],
-  gone: ["Notes on findings that are gone", "Finding", "Your notes", "Key"],
+  gone: ["Notes on findings that are gone", "Key", "Your notes", "Finding"],
   functions: ["Functions used", "Calls", "Where", "Sources"],
-  notFollowed: ["Not followed", "Cells", "Formulas", "Why"],
+  notFollowed: ["Not followed", "Formulas", "Cells", "Why"],
   changes: ["Changes since the last report", "Cells", "What", "Why"],
-  snapshot: ["Snapshot", "Cells", "Formula", "Functions", "Inputs", "Values", "Version"],
+  snapshot: ["Snapshot", "Cells", "Formula", "Inputs", "Values", "Functions", "Version"],
 } as const;
+
+const widths = [180, 110, 170, 330, 300, 190, 60, 50, 130, 180, 220, 120];
 
 export interface ReportFacts {
   look: Look;
@@ -43,6 +46,17 @@ export interface ReportFacts {
   date: string;
   /** What stood in the report before: its notes are the reader's own. */
   before: Report | undefined;
+}
+
+/** Every title stands in the first column; the snapshot is for the next look, and its long lists stay on one line. */
+export function reportLook(cells: readonly (readonly Written[])[]): SheetLook {
+  const titles = new Set<string>([reportSheet, ...Object.values(headings).map(([first]) => first)]);
+  const first = cells.map(([cell]) => (typeof cell === "object" && cell ? cell.text : ""));
+  return {
+    widths,
+    headings: first.flatMap((text, row) => (titles.has(text) ? [row] : [])),
+    wrapped: first.indexOf(headings.snapshot[0]),
+  };
 }
 
 /** What a report holds that outlives it. */
@@ -64,29 +78,30 @@ export function reportCells({ look, accepted, changes, version, date, before }: 
   const notes = before?.notes ?? [];
   const gone = notes.filter(({ key }) => !findings.some((finding) => finding.key === key));
   const open = findings.filter((finding) => standingOf(finding, accepted) !== "accepted").length;
-  const rows: (string | number)[][] = [
-    [reportSheet],
+  const facts: [string, string][] = [
     ["Written by Wallfall", version],
     ["Date", date],
     ["Constants", CODATA.text],
     ["Looked at", lookText(look)],
     ["Found", `${counted(open, "open finding")}, ${findings.length - open} accepted`],
-    [
-      "",
-      "Estimates within stated models, never a clearance to touch, open or energise anything. The column of notes is yours: it stays when the report is written again.",
-    ],
+    ["Cautions", "Estimates within stated models, never a clearance to touch, open or energise anything."],
+    ["Your notes", "The column of notes is yours: it stays when the report is written again."],
+  ];
+  const rows: (string | number | null)[][] = [
+    [reportSheet],
+    ...facts.map(([name, fact]) => [name, null, null, fact]),
     [],
     [...headings.findings],
     ...findings.map((finding) => findingRow(finding, accepted, notes)),
     ...(gone.length === 0
       ? []
-      : [[], [...headings.gone], ...gone.map(({ finding, text, key }) => ["", finding, text, key])]),
+      : [[], [...headings.gone], ...gone.map(({ finding, text, key }) => ["", key, text, finding])]),
     [],
     [...headings.functions],
     ...look.uses.map(functionRow),
     ...table(
       headings.notFollowed,
-      look.notFollowed.map(({ sheet, cells, count, why }) => [sheet, cells, count, why]),
+      look.notFollowed.map(({ sheet, cells, count, why }) => [sheet, count, cells, why]),
     ),
     ...table(
       headings.changes,
@@ -98,9 +113,9 @@ export function reportCells({ look, accepted, changes, version, date, before }: 
       row.sheet,
       row.cells,
       row.formula,
-      row.functions,
       row.inputs,
       row.values,
+      row.functions,
       row.version,
     ]),
   ];
@@ -123,11 +138,11 @@ function findingRow(finding: Finding, accepted: Accepted, notes: readonly Note[]
     causes[finding.cause],
     finding.sheet,
     finding.cells,
-    finding.count,
-    finding.of,
-    finding.functions.join(", "),
     finding.what,
     [finding.detail, fromText(finding)].filter(Boolean).join("; "),
+    finding.functions.join(", "),
+    finding.count,
+    finding.of,
     said[standing],
     reason,
     notes.find(({ key }) => key === finding.key)?.text ?? "",
@@ -152,14 +167,14 @@ export function readReport({ sheets }: WorkbookContent): Report | undefined {
 }
 
 function notesIn(sheet: SheetContent): Note[] {
-  const open = section(sheet, headings.findings).map((row) => ({ key: row[11], finding: row[6], text: row[10] }));
-  const gone = section(sheet, headings.gone).map((row) => ({ key: row[3], finding: row[1], text: row[2] }));
+  const open = section(sheet, headings.findings).map((row) => ({ key: row[11], finding: row[3], text: row[10] }));
+  const gone = section(sheet, headings.gone).map((row) => ({ key: row[1], finding: row[3], text: row[2] }));
   return [...open, ...gone].filter(({ key, text }) => key !== "" && text !== "");
 }
 
 function snapshotIn(sheet: SheetContent): Snapshot[] {
   return section(sheet, headings.snapshot)
-    .map(([sheet, cells, formula, functions, inputs, values, version]) => ({
+    .map(([sheet, cells, formula, inputs, values, functions, version]) => ({
       sheet,
       cells,
       formula,

@@ -1,5 +1,5 @@
 import { version } from "../../functions/version";
-import { readReport, reportCells, reportSheet } from "../findings/report";
+import { readReport, reportCells, reportLook, reportSheet } from "../findings/report";
 import { readersCopy, readersFile } from "../findings/readers-copy";
 import { counted } from "../findings/words";
 import { download } from "./download";
@@ -45,7 +45,7 @@ async function attempt(said: HTMLElement, act: () => Promise<string>): Promise<v
 async function writeReport({ workbook, look, accepted, changes }: Found): Promise<string> {
   const before = readReport(await workbook.read());
   const cells = reportCells({ look, accepted, changes, version, date: today(), before });
-  await workbook.replaceSheet(reportSheet, cells);
+  await workbook.replaceSheet(reportSheet, cells, reportLook(cells));
   const kept = before && before.notes.length > 0 ? ` Your ${counted(before.notes.length, "note")} stayed.` : "";
   return `Written to the sheet “${reportSheet}”.${kept}`;
 }

@@ -163,8 +163,8 @@ function detailOf({ detail, functions }: Finding): Child[] {
   return [detail !== undefined && `${detail} `, links.length > 0 && h("span", { class: "calls" }, ...links)];
 }
 
-/** Codes of errors and symbols keep their case. */
+/** Codes of errors keep their case, and so do symbols, which are short. */
 function capital(text: string): string {
   const plain = text.replace(/\.$/, "");
-  return /^[a-z]+(?=[\s,])/.test(plain) ? plain[0].toUpperCase() + plain.slice(1) : plain;
+  return /^(a |[a-z]{3,}[\s,:])/.test(plain) ? plain[0].toUpperCase() + plain.slice(1) : plain;
 }

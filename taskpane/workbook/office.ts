@@ -4,7 +4,16 @@
  * platform's documentation stands in one small function, so that one that proves wrong is mended in one place.
  */
 import { a1, cellOf, cornersOf } from "./address";
-import type { CellContent, CellPlace, Chart, SheetContent, Workbook, WorkbookContent, Written } from "./workbook";
+import type {
+  CellContent,
+  CellPlace,
+  Chart,
+  SheetContent,
+  SheetLook,
+  Workbook,
+  WorkbookContent,
+  Written,
+} from "./workbook";
 
 export function officeWorkbook(): Workbook {
   return {
@@ -16,7 +25,7 @@ export function officeWorkbook(): Workbook {
       Excel.run((context) => write(context, sheetNamed(context, from.sheet), from.address, cells)),
     goTo: (place) => Excel.run((context) => goTo(context, place)),
     read: (progress, signal) => Excel.run((context) => readAll(context, progress, signal)),
-    replaceSheet: (name, cells) => Excel.run((context) => replaceSheet(context, name, cells)),
+    replaceSheet: (name, cells, look) => Excel.run((context) => replaceSheet(context, name, cells, look)),
     addChart: (chart) => Excel.run((context) => addChart(context, chart)),
     getSetting: (key) => Excel.run((context) => getSetting(context, key)),
     setSetting: (key, value) =>
@@ -106,13 +115,28 @@ async function replaceSheet(
   context: Excel.RequestContext,
   name: string,
   cells: readonly (readonly Written[])[],
+  look?: SheetLook,
 ): Promise<void> {
   const found = context.workbook.worksheets.getItemOrNullObject(name);
   await context.sync();
   const sheet = found.isNullObject ? context.workbook.worksheets.add(name) : found;
   if (!found.isNullObject) sheet.getRange().clear();
   await write(context, sheet, "A1", cells);
+  if (look) dress(sheet, look);
   await context.sync();
+}
+
+/** The host measures columns in points, of which 72 make an inch; a pixel is one of 96. */
+const pointsInPixel = 72 / 96;
+
+function dress(sheet: Excel.Worksheet, { widths, wrapped, headings }: SheetLook): void {
+  widths.forEach((pixels, column) => {
+    sheet.getRangeByIndexes(0, column, 1, 1).format.columnWidth = pixels * pointsInPixel;
+  });
+  const { format } = sheet.getRangeByIndexes(0, 0, Math.max(1, wrapped), widths.length);
+  format.wrapText = true;
+  format.verticalAlignment = "Top";
+  for (const row of headings) sheet.getRangeByIndexes(row, 0, 1, widths.length).format.font.bold = true;
 }
 
 /** Points joined by lines over a measured abscissa: of the host's kinds of chart only the scatter kinds have one. */

@@ -2,7 +2,7 @@ import { BooleanNumber, CellValueType, type ICellData } from "@univerjs/core";
 import type { FWorksheet } from "@univerjs/preset-sheets-core";
 import { selectedCell, type Grid } from "../trial/grid/grid";
 import { a1, cellOf, cellsIn, type Cell } from "./address";
-import type { CellContent, CellPlace, SheetContent, Workbook, WorkbookContent, Written } from "./workbook";
+import type { CellContent, CellPlace, SheetContent, SheetLook, Workbook, WorkbookContent, Written } from "./workbook";
 
 /** The trial sheet's grid behind the pane's interface. */
 export function trialWorkbook(grid: Grid): Workbook {
@@ -26,13 +26,15 @@ export function trialWorkbook(grid: Grid): Workbook {
       bringIntoView(sheet, { row, column });
     },
     read: (progress, signal) => read(grid, progress, signal),
-    async replaceSheet(name, cells) {
+    async replaceSheet(name, cells, look) {
       const { workbook } = grid;
       await workbook.endEditingAsync(true);
       const shown = workbook.getActiveSheet();
       const found = workbook.getSheetByName(name);
       found?.clear();
-      write(found ?? workbook.insertSheet(name), { row: 0, column: 0 }, cells);
+      const sheet = found ?? workbook.insertSheet(name);
+      write(sheet, { row: 0, column: 0 }, cells);
+      if (look) dress(sheet, look);
       workbook.setActiveSheet(shown);
       await grid.calculated();
     },
@@ -91,6 +93,12 @@ function write(sheet: FWorksheet, from: Cell, cells: readonly (readonly Written[
     }),
   );
   sheet.getRange(from.row, from.column, rows, columns).setValues(filled);
+}
+
+function dress(sheet: FWorksheet, { widths, wrapped, headings }: SheetLook): void {
+  widths.forEach((pixels, column) => sheet.setColumnWidth(column, pixels));
+  sheet.getRange(0, 0, Math.max(1, wrapped), widths.length).setWrap(true).setVerticalAlignment("top");
+  for (const row of headings) sheet.getRange(row, 0, 1, widths.length).setFontWeight("bold");
 }
 
 /** What stood there goes, whatever its kind: a formula, a formula shared with its neighbours, a small document. */

@@ -15,6 +15,16 @@ export type CellContent = number | string | boolean | null | { error: string; me
  */
 export type Written = string | number | boolean | null | { text: string };
 
+/** How a sheet that is made should look, as far as that helps to read it. */
+export interface SheetLook {
+  /** Pixels by column, from the first on. */
+  widths: readonly number[];
+  /** In so many rows from the top, text longer than its column goes on in the next line. */
+  wrapped: number;
+  /** Rows of headings, counted from 0. */
+  headings: readonly number[];
+}
+
 /** The used part of one sheet, from its top left cell on. Formulas start with "="; where there is none, undefined. */
 export interface SheetContent {
   name: string;
@@ -61,7 +71,7 @@ export interface Workbook {
   /** The whole used content, sheet by sheet; progress from 0 to 1; stops early when the signal says so. */
   read(progress?: (done: number) => void, signal?: AbortSignal): Promise<WorkbookContent>;
   /** Makes or replaces a sheet of this name with these cells; other sheets are untouched. */
-  replaceSheet(name: string, cells: readonly (readonly Written[])[]): Promise<void>;
+  replaceSheet(name: string, cells: readonly (readonly Written[])[], look?: SheetLook): Promise<void>;
   /** Small settings kept inside the workbook, such as the reasons for accepted findings. */
   getSetting(key: string): Promise<string | undefined>;
   setSetting(key: string, value: string): Promise<void>;

@@ -40,8 +40,8 @@ describe("the report sheet", () => {
     await report(workbook);
     const said = sheetOf(content).values.map((row) => row.join(" | "));
     expect(said[0]).toBe("Sheath findings");
-    expect(said.find((row) => row.startsWith("Written by"))).toBe("Written by Wallfall | 1.0.0");
-    expect(said).toContain("Date | 2026-05-04");
+    expect(said.find((row) => row.startsWith("Written by"))).toBe("Written by Wallfall |  |  | 1.0.0");
+    expect(said).toContain("Date |  |  | 2026-05-04");
     expect(said.find((row) => row.startsWith("Constants"))).toMatch(/CODATA 2022/);
     expect(said.find((row) => row.startsWith("Doubtful inputs"))).toMatch(
       /Chamber \| C10 .*accepted on 2026-05-03 \| probe checked/,
@@ -56,7 +56,7 @@ describe("the report sheet", () => {
     const { workbook, content } = memoryWorkbook(chamber().type("C10", 3e10).type("K20", -3).build());
     await report(workbook);
     const note = (cause: string, text: string) => {
-      const head = rowWith(content, "Your notes");
+      const head = rowWith(content, "Cause");
       const row = sheetOf(content).values.find((each) => each[0] === cause)!;
       row[head.indexOf("Your notes")] = text;
     };

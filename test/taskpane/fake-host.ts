@@ -20,6 +20,8 @@ const missing = () => ({ isNullObject: true });
 export class FakeHost {
   readonly sheets = new Map<string, Map<string, Content>>();
   readonly settings = new Map<string, unknown>();
+  /** Looks by range, such as "Sheet!A1:B2". */
+  readonly formats = new Map<string, Record<string, unknown>>();
   readonly tables: Record<string, Table[]> = {};
   readonly complaints: string[] = [];
   readonly charts: Record<string, unknown>[] = [];
@@ -144,6 +146,7 @@ export class FakeHost {
     const facts = (asked: ReadonlySet<string>) => (asked.has("formulas") ? { ...place, ...content() } : place);
     return hostObject(batch, facts, {
       at: `${sheet}!${address}`,
+      format: this.format(`${sheet}!${address}`),
       worksheet: hostObject(batch, () => ({ name: sheet })),
       clear: () => batch.waiting.push(() => this.cells(sheet).clear()),
       select: () => batch.waiting.push(() => (this.shown = { sheet, address })),
@@ -153,6 +156,12 @@ export class FakeHost {
       },
       "set formulas": (formulas: unknown[][]) => batch.waiting.push(() => this.type(sheet, from, formulas)),
     });
+  }
+
+  private format(place: string): Record<string, unknown> {
+    const format = this.formats.get(place) ?? { font: {} };
+    this.formats.set(place, format);
+    return format;
   }
 
   /** What is set on a chart before the next sync. */

@@ -164,6 +164,13 @@ test("a sheet is made where there is none, and replaced whole where there is one
   expect(host.row("Pre clean", 2)).toEqual([1e16, 3]);
 });
 
+test("a sheet is made with the looks asked for: widths in points, wrapped rows, bold headings", async () => {
+  await workbook.replaceSheet("Report", [["title"], ["a", "b"]], { widths: [96, 48], wrapped: 1, headings: [0] });
+  const look = (range: string) => host.formats.get(`Report!${range}`);
+  expect([look("A1:A1"), look("B1:B1")]).toMatchObject([{ columnWidth: 72 }, { columnWidth: 36 }]);
+  expect(look("A1:B1")).toMatchObject({ wrapText: true, verticalAlignment: "Top", font: { bold: true } });
+});
+
 test("text from anywhere else stays text, whatever it begins with, and an empty text clears a cell", async () => {
   const texts = ["=1+1", "+1", "-50 V", "@SUM(A1)", "'quoted", "1/2"];
   await workbook.write({ sheet: "Pre clean", address: "A1" }, [texts.map((text) => ({ text }))]);
