@@ -14,19 +14,7 @@ export type FrontDoor = (...cells: any[]) => any[][];
 
 /** Every custom function by its name. The enums that stand beside them in their files are left out. */
 export const frontDoors: Readonly<Record<string, FrontDoor>> = Object.fromEntries(
-  [
-  edge,
-  wall,
-  layer,
-  rf,
-  negativeIons,
-  ionMix,
-  electrons,
-  magnetised,
-  probe,
-  checks,
-  helpers,
-]
+  [edge, wall, layer, rf, negativeIons, ionMix, electrons, magnetised, probe, checks, helpers]
     .flatMap((family) => Object.entries(family) as [string, unknown][])
     .filter((named): named is [string, FrontDoor] => typeof named[1] === "function"),
 );
