@@ -60,8 +60,10 @@ export class Sheet {
     return this.spillAt.get(pack(row, column));
   }
 
-  get spills(): Iterable<Area> {
-    return this.spillAt.values();
+  /** Whether a formula in another cell fills this one. */
+  isFilled(row: number, column: number): boolean {
+    for (const area of this.spillAt.values()) if (contains(area, { row, column })) return true;
+    return false;
   }
 
   /** The cell's content as a function gets it. */

@@ -93,13 +93,8 @@ function itemAt(looking: Recalculation, sheet: Sheet, row: number, column: numbe
   const parsed = looking.parsed(sheet, row, column);
   if (parsed) return { form: parsed.form };
   const typed = sheet.value(row, column);
-  if (typed === null || typed === "" || isSpilled(sheet, { row, column })) return undefined;
+  if (typed === null || typed === "" || sheet.isFilled(row, column)) return undefined;
   return { typed };
-}
-
-function isSpilled(sheet: Sheet, place: Place): boolean {
-  for (const area of sheet.spills) if (contains(area, place)) return true;
-  return false;
 }
 
 /** The same formula beside a break, or text beside text: a row of another kind that runs across the table, and meant. */

@@ -92,11 +92,11 @@ function valuesOf(book: Book, sheet: string, { row, column, rows, columns }: Are
   );
 }
 
-/** What a cell shows as something to write: an error becomes the text of its code, with its message where there is one. */
+/** What a cell shows as something to write: an error becomes the text of its code, as it looks in the cell. */
 export function asValue(value: CellContent): Written {
   if (value === null || value === "") return "";
   if (typeof value === "string") return { text: value };
-  return typeof value === "object" ? { text: [value.error, value.message].filter(Boolean).join(" ") } : value;
+  return typeof value === "object" ? { text: value.error } : value;
 }
 
 function printOf(values: readonly CellContent[]): string {

@@ -1,30 +1,57 @@
-import { entryNamed } from "../../functions/catalogue";
-import type { Written } from "../workbook/workbook";
+import { checks, entryNamed } from "../../functions/catalogue";
+import type { SheetLook, Workbook, Written } from "../workbook/workbook";
 import type { FileBook, FileCell, FileSheet } from "../workbook/xlsx-book";
 import { cellsIn, rangesText } from "./area";
+import type { Sheet } from "./book";
 import type { Fill } from "./fill";
 import type { Finding } from "./finding";
 import { asValue } from "./keep";
 import type { Look } from "./look";
 import { findingText } from "./words";
 
-/** A sheet to be made for readers who don't have the add-in. */
-export interface CopiedSheet {
-  name: string;
-  cells: Written[][];
+/** What readers who don't have the add-in get beside the sheets that call our functions. */
+export interface ReadersCopy {
+  /** Sheets to copy, under what name, and what to write over the copy from A1 on: a value for every formula. */
+  copies: { of: string; name: string; values: Written[][] }[];
+  /** A sheet of formulas as text, and what holds of them. */
+  list: { name: string; cells: Written[][]; look: SheetLook };
 }
 
-/** The sheets that call our functions, with values in place of all formulas, and one that lists the formulas and what holds of them. */
-export function readersCopy(look: Look): CopiedSheet[] {
+export function readersCopy(look: Look): ReadersCopy {
   const taken = new Set(look.book.sheets.map(({ name }) => name.toLowerCase()));
   const sheets = look.book.sheets.filter(({ name }) => look.fills.some(({ sheet }) => sheet === name));
-  const copies = sheets.map((sheet) => ({
-    name: freeName(`${sheet.name} values`, taken),
-    cells: Array.from({ length: sheet.rows }, (_, row) =>
-      Array.from({ length: sheet.lengthOf(row) }, (_, column) => asValue(sheet.value(row, column))),
-    ),
-  }));
-  return [...copies, { name: freeName("Formulas and verdicts", taken), cells: listOf(look) }];
+  return {
+    copies: sheets.map((sheet) => ({
+      of: sheet.name,
+      name: freeName(`${sheet.name} values`, taken),
+      values: Array.from({ length: sheet.rows }, (_, row) =>
+        Array.from({ length: sheet.lengthOf(row) }, (_, column) => valueOver(sheet, row, column)),
+      ),
+    })),
+    list: {
+      name: freeName("Formulas and verdicts", taken),
+      cells: listOf(look),
+      look: { widths: listWidths, wrapped: look.fills.length + 1, headings: [0] },
+    },
+  };
+}
+
+const listWidths = [110, 150, 320, 180, 420, 320];
+
+/** Nothing for what was typed: it is in the copy already. */
+function valueOver(sheet: Sheet, row: number, column: number): Written {
+  const isTyped = sheet.formula(row, column) === undefined && !sheet.isFilled(row, column);
+  return isTyped ? null : asValue(sheet.value(row, column));
+}
+
+/** The values over a copy, sheet by sheet, then the list; nothing else is written to. */
+export async function writeReadersCopy(workbook: Workbook, { copies, list }: ReadersCopy): Promise<string[]> {
+  for (const { of, name, values } of copies) {
+    await workbook.copySheet(of, name);
+    await workbook.write({ sheet: name, address: "A1" }, values);
+  }
+  await workbook.replaceSheet(list.name, list.cells, list.look);
+  return [...copies.map(({ name }) => name), list.name];
 }
 
 /** A name that no sheet has; hosts allow 31 characters. */
@@ -45,7 +72,7 @@ export function readersFile(book: FileBook, look: Look): FileBook {
     name: freeName("Formulas and verdicts", taken),
     cells: listOf(look).map((row) => row.map((cell) => ({ value: plain(cell) }))),
     tables: [],
-    widths: { 0: 110, 1: 110, 2: 320, 3: 140, 4: 420, 5: 320 },
+    widths: { ...listWidths },
     heights: {},
     merged: [],
   };
@@ -90,8 +117,12 @@ function verdictOf(fill: Fill, findings: readonly Finding[]): string {
   const found = findings.filter(
     ({ sheet, cells }) => sheet === fill.sheet && cellsIn(cells).some(({ row, column }) => own.has(`${row},${column}`)),
   );
-  const limits = counts.length > 0 ? counts.join(", ") : "no limit was tested";
+  const limits = fill.calls.every(isCheck) ? "its cells say" : counts.join(", ") || "no limit was tested";
   return [limits, ...found.map(findingText)].join("; ");
+}
+
+function isCheck(name: string): boolean {
+  return checks.family.entries.some((entry) => entry.name === name);
 }
 
 function sourcesOf({ calls }: Fill): string {

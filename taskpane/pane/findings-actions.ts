@@ -1,6 +1,6 @@
 import { version } from "../../functions/version";
 import { readReport, reportCells, reportLook, reportSheet } from "../findings/report";
-import { readersCopy, readersFile } from "../findings/readers-copy";
+import { readersCopy, readersFile, writeReadersCopy } from "../findings/readers-copy";
 import { counted } from "../findings/words";
 import { download } from "./download";
 import { writeBook } from "../workbook/xlsx-write";
@@ -51,9 +51,8 @@ async function writeReport({ workbook, look, accepted, changes }: Found): Promis
 }
 
 async function copyIntoSheets({ workbook, look }: Found): Promise<string> {
-  const copies = readersCopy(look);
-  for (const { name, cells } of copies) await workbook.replaceSheet(name, cells);
-  return `Made ${copies.map(({ name }) => `“${name}”`).join(", ")}. The sheets they come from are as they were.`;
+  const made = await writeReadersCopy(workbook, readersCopy(look));
+  return `Made ${made.map((name) => `“${name}”`).join(", ")}. The sheets they come from are as they were.`;
 }
 
 async function saveCopy({ file, look }: Found): Promise<string> {

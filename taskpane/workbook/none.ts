@@ -12,6 +12,7 @@ export const noWorkbook: Workbook = {
   goTo: refuse,
   read: refuse,
   replaceSheet: refuse,
+  copySheet: refuse,
   addChart: refuse,
   getSetting: () => Promise.resolve(undefined),
   setSetting: refuse,

@@ -26,6 +26,7 @@ export function officeWorkbook(): Workbook {
     goTo: (place) => Excel.run((context) => goTo(context, place)),
     read: (progress, signal) => Excel.run((context) => readAll(context, progress, signal)),
     replaceSheet: (name, cells, look) => Excel.run((context) => replaceSheet(context, name, cells, look)),
+    copySheet: (name, copy) => Excel.run((context) => copySheet(context, name, copy)),
     addChart: (chart) => Excel.run((context) => addChart(context, chart)),
     getSetting: (key) => Excel.run((context) => getSetting(context, key)),
     setSetting: (key, value) =>
@@ -123,6 +124,11 @@ async function replaceSheet(
   if (!found.isNullObject) sheet.getRange().clear();
   await write(context, sheet, "A1", cells);
   if (look) dress(sheet, look);
+  await context.sync();
+}
+
+async function copySheet(context: Excel.RequestContext, name: string, copy: string): Promise<void> {
+  sheetNamed(context, name).copy("End").name = copy;
   await context.sync();
 }
 

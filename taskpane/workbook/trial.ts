@@ -38,6 +38,17 @@ export function trialWorkbook(grid: Grid): Workbook {
       workbook.setActiveSheet(shown);
       await grid.calculated();
     },
+    async copySheet(name, copy) {
+      const { workbook } = grid;
+      await workbook.endEditingAsync(true);
+      const shown = workbook.getActiveSheet();
+      const made = workbook.duplicateSheet(sheetNamed(grid, name));
+      made.setName(copy);
+      workbook.setActiveSheet(made);
+      workbook.moveActiveSheet(workbook.getSheets().length - 1);
+      workbook.setActiveSheet(shown);
+      await grid.calculated();
+    },
     addChart: () => Promise.reject(new Error("the trial sheet draws no charts")),
     getSetting: (key) => Promise.resolve(getSetting(storageKey(grid, key))),
     setSetting: (key, value) => Promise.resolve(setSetting(storageKey(grid, key), value)),

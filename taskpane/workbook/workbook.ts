@@ -72,6 +72,8 @@ export interface Workbook {
   read(progress?: (done: number) => void, signal?: AbortSignal): Promise<WorkbookContent>;
   /** Makes or replaces a sheet of this name with these cells; other sheets are untouched. */
   replaceSheet(name: string, cells: readonly (readonly Written[])[], look?: SheetLook): Promise<void>;
+  /** Makes a copy of a sheet, with its looks, behind all others; the sheet itself is untouched. */
+  copySheet(name: string, copy: string): Promise<void>;
   /** Small settings kept inside the workbook, such as the reasons for accepted findings. */
   getSetting(key: string): Promise<string | undefined>;
   setSetting(key: string, value: string): Promise<void>;

@@ -70,6 +70,7 @@ export function memoryWorkbook(
       else content.sheets[at] = made;
       write(made, "A1", cells);
     },
+    copySheet: async (name, copy) => void content.sheets.push({ ...structuredClone(sheetNamed(name)), name: copy }),
     goTo: () => Promise.resolve(),
     getSetting: (key) => Promise.resolve(settings.get(key)),
     setSetting: async (key, value) => void settings.set(key, value),

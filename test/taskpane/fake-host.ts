@@ -108,6 +108,15 @@ export class FakeHost {
   private sheet(batch: Batch, name: string): object {
     const range = (from: Cell, to: Cell) => this.range(batch, name, `${a1(from)}:${a1(to)}`);
     return hostObject(batch, () => (this.cells(name), {}), {
+      copy: () => {
+        batch.waiting.push(() => this.sheets.set(`${name} (2)`, new Map(this.cells(name))));
+        return this.sheet(batch, `${name} (2)`);
+      },
+      "set name": (other: string) =>
+        batch.waiting.push(() => {
+          this.sheets.set(other, this.cells(name));
+          this.sheets.delete(name);
+        }),
       activate: () => batch.waiting.push(() => (this.shown = { ...this.shown, sheet: name })),
       getRange: (address = "A1:XFD1048576") => this.range(batch, name, address),
       getRangeByIndexes: (row: number, column: number, height: number, width: number) =>

@@ -164,6 +164,12 @@ test("a sheet is made where there is none, and replaced whole where there is one
   expect(host.row("Pre clean", 2)).toEqual([1e16, 3]);
 });
 
+test("a sheet is copied under a name of its own", async () => {
+  await workbook.copySheet("Pre clean", "Pre clean values");
+  expect(host.row("Pre clean values", 2)).toEqual([1e16, 3]);
+  expect(host.row("Pre clean", 2)).toEqual([1e16, 3]);
+});
+
 test("a sheet is made with the looks asked for: widths in points, wrapped rows, bold headings", async () => {
   await workbook.replaceSheet("Report", [["title"], ["a", "b"]], { widths: [96, 48], wrapped: 1, headings: [0] });
   const look = (range: string) => host.formats.get(`Report!${range}`);
