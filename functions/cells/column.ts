@@ -62,10 +62,14 @@ function readNumbers(input: Input, cells: Cells, shape: Shape): Column | undefin
   return { values, shape, odd };
 }
 
+/** The numbers that need no further look: where 0 counts as blank, those above it. */
+export function quickRange({ least, most, zeroIsValue }: Input): readonly [least: number, most: number] {
+  return [zeroIsValue || least > 0 ? least : Number.MIN_VALUE, most];
+}
+
 /** Copies cells from an index on while they are numbers in the input's range; returns where it stopped. */
 function copyNumbers(input: Input, cells: Cells, { rows, columns }: Shape, values: Float64Array, from: number): number {
-  const { most, zeroIsValue } = input;
-  const least = zeroIsValue || input.least > 0 ? input.least : Number.MIN_VALUE;
+  const [least, most] = quickRange(input);
   if (columns === 1) {
     for (let i = from; i < rows; i++) {
       const cell = cells[i][0];

@@ -3,7 +3,7 @@ import type { Fault } from "./fault";
 import type { CellError } from "./host";
 import type { Input } from "./inputs";
 import type { Quantity } from "./quantities";
-import type { Loop } from "./rows";
+import type { Loop } from "./quick-column";
 import type { Twin } from "./twin";
 
 /** What a cell of a result may hold before it goes to the host. */

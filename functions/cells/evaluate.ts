@@ -6,6 +6,7 @@ import { toCellError, type CellError } from "./host";
 import type { Input } from "./inputs";
 import { readOutputUnit, type Conversion } from "./quantity-text";
 import type { Quantity } from "./quantities";
+import { quickColumn } from "./quick-column";
 import { applyRows, unexpected } from "./rows";
 import { giveBack } from "./scratch";
 
@@ -99,12 +100,14 @@ function blankFault({ name, kind, zeroIsValue, example }: Input): Fault {
 
 function evaluateRows(entry: Entry<any>, args: readonly unknown[], result: Quantity): Result {
   const inputs = entry.takesUnit ? [...entry.inputs, unitInput(result)] : entry.inputs;
+  const quick = quickColumn(entry, inputs, args);
+  if (quick) return quick;
   const reading = readInputs(inputs, args);
   if (reading instanceof Fault) return [[toCellError(reading)]];
   const { shape, columns, odd } = reading;
   const size = shape.rows * shape.columns;
   const values = columns.slice(0, entry.inputs.length).map((column) => column.values);
-  const { numbers, others } = applyRows(entry, values, size, odd);
+  const { numbers, others } = applyRows(entry.compute, values, size, odd);
   if (entry.takesUnit) convert(numbers, columns[columns.length - 1].values);
   const special = (index: number): Value | CellError => {
     if (odd?.[index]) return oddResult(inputs, reading, index);
@@ -188,7 +191,7 @@ function evaluateTable(entry: Entry<any>, args: readonly unknown[]): Result {
   const size = shape.rows * shape.columns;
   if (shape.columns > 1) return [[toCellError(tableOverRow(entry, shape))]];
   const { others } = applyRows(
-    entry,
+    entry.compute,
     columns.map((column) => column.values),
     size,
     odd,

@@ -4,18 +4,6 @@ import { take } from "./scratch";
 type Compute = (...values: any[]) => unknown;
 type Values = ArrayLike<any>;
 
-/**
- * All rows of one function: fills `out` with the numbers and returns the other results by row. A step is 0 for a column
- * of one value. The build gives each entry a loop of its own (manifest/build/loop-loader.js).
- */
-export type Loop = (
-  compute: Compute,
-  columns: readonly Values[],
-  steps: readonly number[],
-  out: Float64Array,
-  odd: Uint8Array | undefined,
-) => Map<number, unknown> | undefined;
-
 /** Results of a column of calls: finite and other numbers in `numbers`, everything else by row in `others`. */
 export interface Computed {
   numbers: Float64Array;
@@ -26,30 +14,14 @@ export interface Computed {
  * Calls `compute` once per row over columns that hold one value per row, or one value for all. Rows marked odd are
  * skipped; a row that throws gets a Fault of its own.
  */
-export function applyRows(
-  { compute, loop }: { compute: Compute; loop?: Loop },
-  columns: readonly Values[],
-  size: number,
-  odd?: Uint8Array,
-): Computed {
+export function applyRows(compute: Compute, columns: readonly Values[], size: number, odd?: Uint8Array): Computed {
   const numbers = take(size);
-  const steps = columns.map((values) => (values.length === 1 ? 0 : 1));
-  if (loop && size > 1) {
-    try {
-      return { numbers, others: loop(compute, columns, steps, numbers, odd) };
-    } catch {
-      // A row throws: once more, with care.
-    }
-  }
-  return { numbers, others: rowByRow(caller(compute, columns, steps), numbers, odd) };
-}
-
-function rowByRow(at: (row: number) => unknown, numbers: Float64Array, odd?: Uint8Array): Computed["others"] {
   let others: Computed["others"];
+  const at = caller(compute, columns);
   let row = 0;
-  while (row < numbers.length) {
+  while (row < size) {
     try {
-      for (; row < numbers.length; row++) {
+      for (; row < size; row++) {
         if (odd !== undefined && odd[row] !== 0) continue;
         const result = at(row);
         if (typeof result === "number") numbers[row] = result;
@@ -59,7 +31,7 @@ function rowByRow(at: (row: number) => unknown, numbers: Float64Array, odd?: Uin
       (others ??= new Map()).set(row++, unexpected(error));
     }
   }
-  return others;
+  return { numbers, others };
 }
 
 /** A bug stays in its own cell, and says so. */
@@ -72,8 +44,9 @@ export function unexpected(error: unknown): Fault {
  * The call for one row. Arguments go by position, without an array in between: over long columns that spread costs more
  * than the physics. A column of one value has step 0 and stays where it is.
  */
-function caller(compute: Compute, columns: readonly Values[], steps: readonly number[]): (row: number) => unknown {
+function caller(compute: Compute, columns: readonly Values[]): (row: number) => unknown {
   const [a, b, c, d, e, f, g, h, k] = columns;
+  const steps = columns.map((values) => (values.length === 1 ? 0 : 1));
   const [p, q, r, s, t, u, v, w, x] = steps;
   switch (columns.length) {
     case 1:

@@ -4,7 +4,7 @@ import ts from "typescript";
  * Gives every closed form a loop over rows of its own. One loop shared by all functions makes the engine box each number
  * on its way in and out, because it cannot tell which function it will call; in a loop of its own the function melts
  * into the loop, and a column costs about what a loop written by hand does. Nothing but speed depends on it: without it
- * cells/rows.ts goes down the rows itself, which is good enough for what takes longer to compute.
+ * cells/rows.ts goes down the rows, which is good enough for what takes longer to compute.
  */
 export default function giveLoops(code) {
   return entryFacts(code, this.resourcePath)
@@ -44,18 +44,20 @@ function inputCount(facts) {
   return isListed ? inputs.elements.length : 0;
 }
 
-/** The Loop of cells/rows.ts for so many columns. */
+/**
+ * The Loop of cells/quick-column.ts for so many inputs. A number alone equals itself after +; a fault makes no number.
+ * All variables are declared input by input, so that short names come out alike in every loop and compress to little.
+ */
 function loop(count) {
-  const each = (letter) => Array.from({ length: count }, (_, i) => `${letter}${i}`).join(",");
-  const cells = Array.from({ length: count }, (_, i) => `c${i}[i*s${i}]`).join(",");
-  return `(compute: any, [${each("c")}]: any, [${each("s")}]: any, out: any, odd: any) => {
-    let others;
-    for (let i = 0; i < out.length; i++) {
-      if (odd !== undefined && odd[i] !== 0) continue;
-      const result = compute(${cells});
-      if (typeof result === "number") out[i] = result;
-      else (others ??= new Map()).set(i, result);
+  const each = (text) => Array.from({ length: count }, (_, k) => text.replaceAll("#", k));
+  return `(compute: any, out: any, scale: any, offset: any, i: any, value: any, [${each("[c#, s#, l#, m#, r#, x#]")}]: any) => {
+    for (i = 0; i < out.length; i++) {
+      ${each(`x# = (r# = c#[i * s#])[0];
+      if (s# !== 0 && !(x# >= l# && x# <= m# && x# === +x# && r#.length === 1)) return i;`).join("\n")}
+      value = (compute(${each("x#")}) - offset) / scale;
+      if (value - value !== 0) return i;
+      out[i] = [value];
     }
-    return others;
+    return i;
   }`;
 }
