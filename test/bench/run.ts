@@ -5,11 +5,15 @@ import { cells } from "./cells";
 import { checks } from "./checks";
 import { findings } from "./findings";
 import { fillDown } from "./fill-down";
+import { functions } from "./functions";
+import { growth } from "./growth";
 import type { Row } from "./measure";
 import { trial } from "./trial";
 
 const sections: Record<string, () => Row[] | Promise<Row[]>> = {
   "Coming through cells": cells,
+  "Every function": functions,
+  "Growth, memory and start": growth,
   Checks: checks,
   "Looking through workbooks": findings,
   "Calls filled down": fillDown,
@@ -22,12 +26,18 @@ for (const [title, run] of Object.entries(sections)) {
   if (wanted && !title.toLowerCase().includes(wanted)) continue;
   report[title] = await run();
   console.log(`\n${title}`);
-  for (const { what, value, unit, claim, holds } of report[title]) {
-    const number = value.toPrecision(3).padStart(9);
+  for (const { what, value, unit, claim, holds, also = {} } of report[title]) {
     const verdict = claim ? `${holds ? "holds" : "FAILS"} (${claim})` : "";
-    console.log(`  ${what.padEnd(58)}${number} ${unit.padEnd(14)}${verdict}`);
+    const more = Object.entries(also).map(([unit, value]) => `${short(value)} ${unit}`);
+    console.log(
+      `  ${what.padEnd(58)}${short(value)} ${unit.padEnd(14)}${verdict.padEnd(16)}${more.join("")}`.trimEnd(),
+    );
   }
 }
+function short(value: number): string {
+  return value.toPrecision(3).padStart(9);
+}
+
 const machine = `${os.cpus()[0].model}, ${os.cpus().length} cores, Node.js ${process.version}`;
 mkdirSync("reports", { recursive: true });
 writeFileSync("reports/bench.json", JSON.stringify({ machine, date: new Date().toISOString(), report }, null, 1));
